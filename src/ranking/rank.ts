@@ -1,0 +1,73 @@
+import type { Steel } from "../bridge/yield-stress.js";
+import { type Group, groupsByWeight, type SearchSpace, stands } from "../search/search.js";
+import type { Assessor } from "../specs/contract.js";
+import { byPreference, type Ranked } from "./order.js";
+
+/** A shape on its best layout of one count, and the spacings over which it passes there. */
+export interface Option extends Ranked {
+  readonly assessor: Assessor;
+  /** Least and greatest of the neighbouring spacings, the shown one among them, at all of which the shape passes, ft. */
+  readonly spacingRangeFt: readonly [number, number];
+}
+
+/**
+ * The best options that pass, at most one per count and shape, in the total order.
+ *
+ * Groups are pulled by rising steel weight and count, the first two keys of the order; once enough options stand after a whole group,
+ * no candidate left can come before them, so nothing skipped can change the answer.
+ *
+ * @param space layouts and shapes
+ * @param top options wanted, 1 or more
+ */
+export function rank(space: SearchSpace, top: number): readonly Option[] {
+  const options: Option[] = [];
+  for (const group of groupsByWeight(space)) {
+    if (options.length >= top) break;
+    options.push(...passingOf(group).sort(byPreference));
+  }
+  return options.slice(0, top);
+}
+
+function passingOf(group: Group): Option[] {
+  return group.steels.flatMap((steel) => {
+    const option = bestLayout(group.assessors, steel);
+    return option === null ? [] : [option];
+  });
+}
+
+/** The best layout of one count that a shape passes on, or null. */
+export function bestLayout(assessors: readonly Assessor[], steel: Steel): Option | null {
+  let best: { readonly ranked: Ranked; readonly index: number } | null = null;
+  const passes = assessors.map((assessor, index) => {
+    if (!stands(assessor.layout, steel)) return false;
+    assessor.assess(steel, null);
+    if (!assessor.passes) return false;
+    const ranked = { steel, layout: assessor.layout, governingRatio: assessor.governingRatio };
+    if (best === null || byPreference(ranked, best.ranked) < 0) best = { ranked, index };
+    return true;
+  });
+  if (best === null) return null;
+  const { ranked, index } = best as { ranked: Ranked; index: number };
+  let first = index;
+  let last = index;
+  while (passes[first - 1]) first--;
+  while (passes[last + 1]) last++;
+  const range = [assessors[first].layout.spacingFt, assessors[last].layout.spacingFt] as const;
+  return { ...ranked, assessor: assessors[index], spacingRangeFt: range };
+}
+
+/** The candidate nearest to passing: the smallest governing ratio, then the total order; null when no shape stands under the deck. */
+export function nearestMiss({ assessors, steels }: SearchSpace): { readonly steel: Steel; readonly assessor: Assessor } | null {
+  let nearest: (Ranked & { readonly assessor: Assessor }) | null = null;
+  for (const assessor of assessors) {
+    for (const steel of steels) {
+      if (!stands(assessor.layout, steel)) continue;
+      assessor.assess(steel, null);
+      const ratio = assessor.governingRatio;
+      if (nearest !== null && ratio > nearest.governingRatio) continue;
+      const ranked = { steel, layout: assessor.layout, governingRatio: ratio, assessor };
+      if (nearest === null || ratio < nearest.governingRatio || byPreference(ranked, nearest) < 0) nearest = ranked;
+    }
+  }
+  return nearest;
+}

@@ -1,0 +1,116 @@
+import type { Bridge } from "../bridge/bridge.js";
+import { askedYieldStress } from "../bridge/yield-stress.js";
+import { feetText, shown } from "./numbers.js";
+
+/** Span below which the Alternate Military loading can govern over HS20, ft. Source: statics of the two. */
+const MILITARY_GOVERNS_BELOW_FT = 40;
+
+/** Every assumption an answer rests on, a sentence each, with the values in force. */
+export function assumptionsOf(bridge: Bridge): string[] {
+  return [...deckAssumptions(bridge), ...loadAssumptions(bridge), ...checkAssumptions(bridge)];
+}
+
+/** The assumptions under a live-load answer, which needs no stringers. */
+export function loadsAssumptions(bridge: Bridge): string[] {
+  return [
+    "Simple span, one lane, whole axles, both directions, axles off the span left out; exact places, no stepping.",
+    "No impact, except HL-93, whose figures hold 33 % on truck or tandem and the lane load.",
+    "At each section every effect is at its own worst place of the load.",
+    ...military(bridge),
+  ];
+}
+
+function deckAssumptions(bridge: Bridge): string[] {
+  const { deck, barriers, bracing } = bridge;
+  const thickness = deck.thicknessIn === null ? "" : `${shown(deck.thicknessIn)} in `;
+  const haunch = deck.kind === "concrete" ? `, haunch ${shown(deck.haunchWeightIn)} in over the flange in the weight` : "";
+  const given = bridge.deadLoad;
+  const list = [
+    `Straight, unskewed simple span of ${feetText(bridge.spanFt)} ft, equal shapes at equal spacing; pieces ${feetText(bridge.spanFt + 2 * bridge.pieceOverlapFt)} ft long.`,
+    deck.composite ? "Composite with the deck." : "Noncomposite: the deck adds weight and no strength.",
+  ];
+  if (given.stage1Klf === null) list.push(`Deck: ${thickness}${deck.kind}${haunch}; weight ${deckWeightText(bridge)}.`);
+  else
+    list.push(
+      `Stage 1 dead load given: ${shown(given.stage1Klf)} kip/ft on each stringer; the shape and its miscellaneous steel are added.`,
+    );
+  const barrierText = `two of ${shown(barriers.weightKlf)} kip/ft, base ${feetText(barriers.baseFt)} ft`;
+  if (deck.outToOutFt === null) {
+    list.push(
+      `Only a spacing is given: one interior stringer; deck and wearing surface on the spacing, a quarter of both barriers (${barrierText}); exterior stringers not checked.`,
+    );
+  } else {
+    list.push(
+      given.stage2Klf === null
+        ? `Barriers: ${barrierText}, placed after the deck and shared equally by all stringers.`
+        : `Stage 2 dead load given: ${shown(given.stage2Klf)} kip/ft on each stringer.`,
+    );
+    list.push(
+      given.wearingKlf === null
+        ? `Wearing surface ${shown(bridge.wearingPsf)} lb/ft2 on the roadway, shared equally by all stringers.`
+        : `Wearing surface given: ${shown(given.wearingKlf)} kip/ft on each stringer.`,
+    );
+  }
+  list.push(`Miscellaneous steel ${shown(bridge.steel.miscFraction * 100)} % of the shape.`);
+  const asked = askedYieldStress(bridge);
+  list.push(`Fy ${shown(asked.fyKsi)} ksi unless a list's row says otherwise.`);
+  list.push(
+    bracing.topFlange === "held"
+      ? `Compression flange held by the deck in service; diaphragms at ${feetText(bracing.diaphragmSpacingFt)} ft alone while the deck is poured.`
+      : `Compression flange braced by diaphragms at ${feetText(bracing.diaphragmSpacingFt)} ft, not by the deck.`,
+  );
+  return list;
+}
+
+function deckWeightText(bridge: Bridge): string {
+  const { deckPsf, kind } = bridge.deck;
+  if (deckPsf !== null) return `${shown(deckPsf)} lb/ft2 as given`;
+  return `thickness times ${kind === "concrete" ? 150 : 50} lb/ft3`;
+}
+
+function loadAssumptions(bridge: Bridge): string[] {
+  const { lanes, vehicle, distribution } = bridge.liveLoad;
+  const laneSource = bridge.sources["liveLoad.lanes"] === "practice" ? "by the width of the roadway" : "as given";
+  const list = [
+    bridge.roadwayFt === null
+      ? `Live load ${vehicle}; ${lanes >= 2 ? "two or more lanes" : "one lane"}.`
+      : `Live load ${vehicle}; ${lanes} lane${lanes === 1 ? "" : "s"} ${laneSource} on ${feetText(bridge.roadwayFt)} ft of roadway.`,
+    ...military(bridge),
+    distribution === null
+      ? "Live load to each stringer by Table 3.23.1 in wheel lines, the lever rule beyond its range and for exterior stringers; trucks 4 ft apart regardless of lane lines, curbs ignored for interior stringers (conservative)."
+      : `Distribution given: ${shown(distribution)} wheel lines per stringer for moment and shear, in place of the specification's.`,
+    "Impact applies under every kind of deck, for the stringers are steel.",
+    "Greatest dead and live effects are added, though they stand at slightly different sections (slightly conservative).",
+    "All stringers are equal, so an exterior one is never weaker than an interior one.",
+  ];
+  return list;
+}
+
+function military(bridge: Bridge): string[] {
+  if (bridge.liveLoad.vehicle !== "HS20-44" || bridge.spanFt >= MILITARY_GOVERNS_BELOW_FT) return [];
+  return ["The Alternate Military loading of Interstate bridges is left out; it can govern under 40 ft (vehicle HS20+military)."];
+}
+
+function checkAssumptions(bridge: Bridge): string[] {
+  const { adtt, fatigueDetail } = bridge.liveLoad;
+  const traffic = adtt === null ? "truck traffic not given, taken as 2,500 a day or more" : `${shown(adtt)} trucks a day`;
+  const list = [
+    `Fatigue: HS20 truck, detail ${fatigueDetail === "C-stiffener" ? "C of a stiffener weld" : fatigueDetail}, redundant load paths from three stringers up, ${traffic}; checked at the extreme tension fibre; cycles of the lane loading are not checked.`,
+    "Noncompact shapes take the braced noncompact or partially braced capacity; the straight line that 10.48.3 allows is not used (conservative).",
+  ];
+  if (bridge.deflection.use !== "off") {
+    const use = bridge.deflection.use === "report" ? ", reported only" : "";
+    const share =
+      bridge.deck.outToOutFt === null
+        ? "by the stringer's moment factor"
+        : "all lanes loaded, shared equally by all stringers (presumes diaphragms)";
+    list.push(`Live-load deflection at most span/${shown(bridge.deflection.spanOver)}${use}; ${share}.`);
+  }
+  if (bridge.deck.kind === "concrete") {
+    list.push(
+      `Deck pour: 1.3 times wet deck, steel and ${shown(bridge.pour.constructionPsf)} lb/ft2 on the bare shape (the factor is our choice); twisting of the fascia stringer by overhang brackets is not computed.`,
+    );
+  }
+  list.push("Not covered: deck design, skew, sidewalk load, wind, earthquake, splices, bearings, substructure.");
+  return list;
+}

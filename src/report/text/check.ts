@@ -1,0 +1,74 @@
+import type { CheckAnswer } from "../../answers/check.js";
+import type { Bridge } from "../../bridge/bridge.js";
+import type { Note, StringerAssessment } from "../../specs/contract.js";
+import { assumptionsOf } from "../assumptions.js";
+import { feetText, ratioText, shown } from "../numbers.js";
+import { checkTable, governingText, layoutText, stepLines } from "./assessment-lines.js";
+import { bridgeLines, closing, firstLine, type Style, WIDTH } from "./frame.js";
+import { wrap } from "./table.js";
+
+/** The answer to `check` as plain text: verdict, the checks of both stringers, then every step. */
+export function checkText(bridge: Bridge, { assessment, layoutsTried }: CheckAnswer, style: Style): string {
+  const { layout, source } = assessment;
+  const overhang = layout.overhangFt === null ? "" : `, overhang ${feetText(layout.overhangFt)} ft`;
+  const verdict = assessment.passes ? style.good("OK") : style.bad("NG");
+  const lines = [
+    style.strong(firstLine(bridge)),
+    ...bridgeLines(bridge),
+    "",
+    `${assessment.shape} (${source.file}, line ${source.line}), Fy ${shown(assessment.fyKsi)} ksi, ${layoutText(assessment)}${overhang}: ${verdict}`,
+    `Governing: ${governingText(assessment)}, ratio ${ratioText(assessment.governing.ratio)}`,
+  ];
+  if (layoutsTried > 1) {
+    lines.push(`${layoutsTried} layouts tried; the one shown ${assessment.passes ? "ranks first" : "has the smallest governing ratio"}.`);
+  }
+  for (const stringer of assessment.stringers) {
+    lines.push(
+      "",
+      style.strong(`${capital(stringer.position)} stringer: checks`),
+      ...checkTable(stringer, style),
+      ...supportLines(stringer),
+    );
+    lines.push(...stringer.notes.flatMap((note) => wrap(noteText(note), WIDTH, "")));
+  }
+  for (const stringer of assessment.stringers) {
+    lines.push("", style.strong(`${capital(stringer.position)} stringer: calculation`), ...stepLines(stringer, style));
+  }
+  return [...lines, ...closing(assumptionsOf(bridge)), ""].join("\n");
+}
+
+const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1);
+
+function supportLines({ support, effects }: StringerAssessment): string[] {
+  const needed = support.stiffenersNeeded ? "needed" : "not needed";
+  return [
+    ...wrap(
+      `Bearing stiffeners ${needed}: factored shear ${shown(support.shearKip)} kip, none needed to ${shown(support.withoutStiffenersKip)} kip (${support.article}).`,
+      WIDTH,
+      "",
+    ),
+    ...wrap(
+      `Reaction, unfactored: dead ${shown(effects.deadShearKip)} kip, live with impact ${shown(effects.liveShearKip)} kip. Required: Z ${shown(effects.requiredZIn3 ?? 0)} in3 (flexure, if compact), S ${shown(effects.requiredSIn3 ?? 0)} in3 (overload).`,
+      WIDTH,
+      "",
+    ),
+  ];
+}
+
+/** A note of the calculation in words. */
+export function noteText({ code, args }: Note): string {
+  switch (code) {
+    case "flexure-route":
+      return {
+        compact: "Flexure: compact section (10.48.1).",
+        noncompact: "Flexure: braced noncompact section (10.48.2).",
+        "partially-braced": "Flexure: partially braced section (10.48.4).",
+      }[String(args[0])] as string;
+    case "distribution":
+      return `Distribution: moment by ${args[0]}, axle over the support by ${args[1]}.`;
+    case "outside-flexure-rules":
+      return `Outside the flexure rules: bf/2tf ${shown(Number(args[0]))}, D/tw ${shown(Number(args[1]))}; no capacity is counted.`;
+    default:
+      return code;
+  }
+}

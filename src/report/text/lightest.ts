@@ -1,0 +1,118 @@
+import type { Assessment } from "../../answers/assessment.js";
+import type { LightestAnswer } from "../../answers/lightest.js";
+import type { WhyNotLighter } from "../../answers/why-not-lighter.js";
+import type { Bridge } from "../../bridge/bridge.js";
+import { assumptionsOf } from "../assumptions.js";
+import { feetText, ratioText, shown } from "../numbers.js";
+import { advisoryLines, failingText, governingText, layoutText } from "./assessment-lines.js";
+import { bridgeLines, closing, firstLine, type Style, WIDTH } from "./frame.js";
+import { table, wrap } from "./table.js";
+
+/** Limits that leave no layout, as data of `layoutsOf`. */
+export type InTheWay = readonly { readonly key: string; readonly limit: number; readonly trials: number }[];
+
+/** The answer to `lightest` as plain text. */
+export function lightestText(bridge: Bridge, answer: LightestAnswer, inTheWay: InTheWay, style: Style): string {
+  const { layouts, shapes, candidates } = answer.examined;
+  const lines = [style.strong(firstLine(bridge)), ...bridgeLines(bridge), ""];
+  if (answer.options.length === 0) lines.push(...nothing(answer.nearestMiss, inTheWay, style));
+  else lines.push(...optionTable(answer), ...remarks(answer.options[0].assessment));
+  if (answer.whyNotLighter !== null) lines.push("", ...whyNotLighterLines(answer.whyNotLighter, style));
+  lines.push("", `Examined: ${layouts} layouts x ${shapes} shapes = ${candidates} candidates.`);
+  return [...lines, ...closing(assumptionsOf(bridge)), ""].join("\n");
+}
+
+function optionTable({ options }: LightestAnswer): string[] {
+  const range = ([from, to]: readonly [number, number]): string => (from === to ? "" : `${feetText(from)}-${feetText(to)}`);
+  return table(
+    [
+      { title: "#", align: "right" },
+      { title: "stringers", align: "left" },
+      { title: "passes at", align: "left" },
+      { title: "shape", align: "left" },
+      { title: "lb/ft", align: "right" },
+      { title: "steel", align: "right" },
+      { title: "total kip", align: "right" },
+      { title: "depth", align: "right" },
+      { title: "governed by", align: "left" },
+      { title: "ratio", align: "right" },
+    ],
+    options.map(({ rank, assessment, spacingRangeFt }) => [
+      String(rank),
+      layoutText(assessment),
+      range(spacingRangeFt),
+      assessment.shape,
+      shown(assessment.weightPlf),
+      shown(assessment.steelPlfOfBridge ?? assessment.weightPlf),
+      assessment.steel === null ? "-" : assessment.steel.totalKip.toFixed(1),
+      shown(assessment.depthIn),
+      shortGoverning(assessment),
+      ratioText(assessment.governing.ratio),
+    ]),
+  );
+}
+
+const shortGoverning = (assessment: Assessment): string =>
+  governingText(assessment).replace("interior ", "int ").replace("exterior ", "ext ");
+
+function remarks(best: Assessment): string[] {
+  const overhang = best.layout.overhangFt === null ? "" : ` Overhang ${feetText(best.layout.overhangFt)} ft.`;
+  const lines = [
+    ...wrap(
+      `Steel is lb per ft of bridge; total is pieces at full length with miscellaneous steel; depth in inches; spacings in ft.${overhang}`,
+      WIDTH,
+      "",
+    ),
+  ];
+  const advisories = advisoryLines(best);
+  if (advisories.length > 0) {
+    lines.push("", `Advisories for ${best.shape} (reported, not required)`, ...advisories.flatMap((text) => wrap(text, WIDTH, "  ")));
+  }
+  const supports = best.stringers.filter(({ support }) => support.stiffenersNeeded);
+  lines.push(
+    "",
+    supports.length === 0
+      ? "Bearing stiffeners: none needed (factored shear within 0.75 of the web's, 10.33.2)."
+      : `Bearing stiffeners: needed at the ${supports.map(({ position }) => position).join(" and ")} stringers (10.33.2).`,
+  );
+  return lines;
+}
+
+function nothing(nearest: Assessment | null, inTheWay: InTheWay, style: Style): string[] {
+  if (inTheWay.length > 0) return noLayoutLines(inTheWay, style);
+  if (nearest === null) return [style.bad("Nothing passes: no shape is left to try.")];
+  return [
+    style.bad("Nothing passes."),
+    ...wrap(
+      `Nearest: ${layoutText(nearest)}, ${nearest.shape}, ${governingText(nearest)} at ${ratioText(nearest.governing.ratio)}. It fails: ${failingText(nearest)}.`,
+      WIDTH,
+      "",
+    ),
+  ];
+}
+
+/** Says which limits leave no layout. */
+export function noLayoutLines(inTheWay: InTheWay, style: Style): string[] {
+  const what = inTheWay.map(({ key, limit, trials }) => `${key} ${shown(limit)}${trials === 0 ? "" : ` (stops ${trials} trials)`}`);
+  return [style.bad("No layout fits this deck."), ...wrap(`In the way: ${what.join("; ")}.`, WIDTH, "")];
+}
+
+function whyNotLighterLines(why: WhyNotLighter, style: Style): string[] {
+  const lines = [style.strong("Why not lighter")];
+  if (why.lighterShapes === 0) return [...lines, "No shape of the list is lighter."];
+  const failing = Object.entries(why.failing)
+    .sort((a, b) => b[1] - a[1])
+    .map(([id, count]) => `${count} in ${id}`);
+  lines.push(...wrap(`On the first layout ${why.lighterShapes} shapes are lighter and fail: ${failing.join(", ")}. Nearest:`, WIDTH, ""));
+  lines.push(
+    ...table(
+      [
+        { title: "  shape", align: "left" },
+        { title: "lb/ft", align: "right" },
+        { title: "fails", align: "left" },
+      ],
+      why.nearest.map((assessment) => [`  ${assessment.shape}`, shown(assessment.weightPlf), failingText(assessment)]),
+    ),
+  );
+  return lines;
+}

@@ -1,0 +1,13 @@
+import { formula } from "../../formula.js";
+
+/** Construction load on the tributary width. Source: common practice (the load); statics. */
+export const constructionLoad = formula("wc", "q * T / 1000", "kip/ft", "statics", ["q", "T"], (q: number, T: number) => (q * T) / 1000);
+/** Factored moment while the deck is poured. Source: AASHTO Standard Specifications, 17th ed., Art. 10.61; the factor is our choice. */
+export const pourMoment = formula(
+  "Mp",
+  "1.3 * (w1 + wc) * L^2 / 8",
+  "kip-ft",
+  "10.61",
+  ["w1", "wc", "L"],
+  (w1: number, wc: number, L: number) => (1.3 * (w1 + wc) * L * L) / 8,
+);

@@ -7,9 +7,8 @@
 import { spawnSync } from "node:child_process";
 import { readFileSync } from "node:fs";
 import { fileURLToPath } from "node:url";
-import { prepare } from "../src/answers/question.js";
+import { ask, prepare } from "../src/answers/question.js";
 import { flagLayer, readLayer } from "../src/bridge/layers.js";
-import { resolveBridge } from "../src/bridge/resolve.js";
 import { readShapes } from "../src/catalogue/read-shapes.js";
 import { readVehicles } from "../src/loads/vehicles.js";
 import { rank } from "../src/ranking/rank.js";
@@ -41,7 +40,9 @@ function startRatio(): void {
     whole.push(wallMs(command));
   }
   const [base, ours] = [median(empty), median(whole)];
-  console.log(`lightest --span 60 --width 33: ${(ours / base).toFixed(2)} times an empty process (${ours.toFixed(0)} ms to ${base.toFixed(0)} ms)`);
+  console.log(
+    `lightest --span 60 --width 33: ${(ours / base).toFixed(2)} times an empty process (${ours.toFixed(0)} ms to ${base.toFixed(0)} ms)`,
+  );
 }
 
 function question() {
@@ -53,9 +54,8 @@ function question() {
       { flag: "--width", key: "deck.outToOutFt", text: "33" },
     ]),
   ];
-  const bridge = resolveBridge(layers, { needs: "layout", vehicles });
   const { shapes } = readShapes(text("data/w-shapes.csv"), "w-shapes.csv", { bundled: true });
-  return prepare({ bridge, shapes, vehicles });
+  return prepare(ask(layers, "layout", shapes, vehicles));
 }
 
 function assessmentRate(): void {
@@ -81,15 +81,25 @@ function assessmentRate(): void {
   const began = performance.now();
   for (let round = 0; round < ROUNDS; round++) rank(space, 5);
   const ranked = (performance.now() - began) / 1000;
-  console.log(`the ranker's question: ${Math.round(assessed / ranked)} candidates settled a second, ${(seconds / ranked).toFixed(2)} times the full search`);
+  console.log(
+    `the ranker's question: ${Math.round(assessed / ranked)} candidates settled a second, ${(seconds / ranked).toFixed(2)} times the full search`,
+  );
 }
 
 function peakMemory(): void {
-  const probe =
-    'process.on("exit", () => process.stderr.write(String(process.resourceUsage().maxRSS / 1024)));';
+  const probe = 'process.on("exit", () => process.stderr.write(String(process.resourceUsage().maxRSS / 1024)));';
   const { stderr } = spawnSync(
     process.execPath,
-    ["--import", `data:text/javascript,${encodeURIComponent(probe)}`, file("dist/cli/main.js"), "lightest", "--span", "60", "--width", "33"],
+    [
+      "--import",
+      `data:text/javascript,${encodeURIComponent(probe)}`,
+      file("dist/cli/main.js"),
+      "lightest",
+      "--span",
+      "60",
+      "--width",
+      "33",
+    ],
     { encoding: "utf8", stdio: ["ignore", "ignore", "pipe"] },
   );
   console.log(`peak memory: ${Number(stderr).toFixed(0)} MB`);

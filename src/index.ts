@@ -4,7 +4,7 @@ export type { Assessment } from "./answers/assessment.js";
 export { type CheckAnswer, check } from "./answers/check.js";
 export { type CountRow, type CountsAnswer, counts } from "./answers/counts.js";
 export { type LightestAnswer, lightest, type RankedOption } from "./answers/lightest.js";
-export { type Examined, type Prepared, prepare, type Question } from "./answers/question.js";
+export { ask, type Examined, type Prepared, prepare, type Question } from "./answers/question.js";
 export { type WhyNotLighter, whyNotLighter } from "./answers/why-not-lighter.js";
 export type { Bridge, BridgeValues, Source } from "./bridge/bridge.js";
 export { type FlagValue, flagLayer, type Layer, readLayer } from "./bridge/layers.js";

@@ -1,5 +1,7 @@
 import type { Bridge } from "../bridge/bridge.js";
+import type { Layer } from "../bridge/layers.js";
 import { type Layouts, layoutsOf } from "../bridge/layouts.js";
+import { type ResolveOptions, resolveBridge } from "../bridge/resolve.js";
 import { gradeShapes, type Steel } from "../bridge/yield-stress.js";
 import type { Shape } from "../catalogue/shape.js";
 import { InputError } from "../errors.js";
@@ -14,10 +16,42 @@ export interface Question {
   readonly bridge: Bridge;
   readonly shapes: readonly Shape[];
   readonly vehicles: readonly Vehicle[];
+  /**
+   * The same question with keys of the bridge file changed, as if flags had said so.
+   *
+   * @param changes values by dotted key
+   * @throws {InputError} if the changed bridge cannot be
+   */
+  readonly vary: (changes: Readonly<Record<string, unknown>>) => Question;
+}
+
+/**
+ * Asks a question of layers of input.
+ *
+ * @param layers weakest first: practice, bridge file, flags
+ * @throws {InputError} naming every fault of the layers
+ */
+export function ask(
+  layers: readonly Layer[],
+  needs: ResolveOptions["needs"],
+  shapes: readonly Shape[],
+  vehicles: readonly Vehicle[],
+): Question {
+  return {
+    bridge: resolveBridge(layers, { needs, vehicles }),
+    shapes,
+    vehicles,
+    vary: (changes) => ask([...layers, changeLayer(changes)], needs, shapes, vehicles),
+  };
+}
+
+function changeLayer(changes: Readonly<Record<string, unknown>>): Layer {
+  return { source: "flag", values: new Map(Object.entries(changes)), place: (key) => ({ field: key }), issues: [] };
 }
 
 /** A question with its layouts and shapes ready to be searched. */
 export interface Prepared {
+  readonly question: Question;
   readonly bridge: Bridge;
   readonly design: Design;
   readonly layouts: Layouts;
@@ -38,7 +72,8 @@ export interface Examined {
  *
  * @throws {InputError} for a shape without a yield stress, and for one explicit layout under which no shape can stand
  */
-export function prepare({ bridge, shapes, vehicles }: Question): Prepared {
+export function prepare(question: Question): Prepared {
+  const { bridge, shapes, vehicles } = question;
   const tooDeep = shapes.filter((shape) => !shallowEnough(bridge, shape));
   const steels = gradeShapes(
     bridge,
@@ -48,7 +83,7 @@ export function prepare({ bridge, shapes, vehicles }: Question): Prepared {
   const design: Design = { bridge, vehicle, vehicles, live: laneEffects(vehicle, bridge.spanFt) };
   const layouts = layoutsOf(bridge);
   refuseImpossible(bridge, layouts, steels);
-  return { bridge, design, layouts, space: searchSpace(specificationOf(bridge), design, layouts.layouts, steels), tooDeep };
+  return { question, bridge, design, layouts, space: searchSpace(specificationOf(bridge), design, layouts.layouts, steels), tooDeep };
 }
 
 /** Whether a shape keeps within the bridge's greatest steel depth and structure depth. */

@@ -1,8 +1,9 @@
 import type { Option } from "../ranking/rank.js";
 import { stands } from "../search/search.js";
-import type { CheckId } from "../specs/contract.js";
+import { ABSENT, type CheckId } from "../specs/contract.js";
 import { type Assessment, assessInFull } from "./assessment.js";
 import type { Prepared } from "./question.js";
+import { type Rescue, rescue } from "./rescue.js";
 
 /** Why no lighter shape serves on the winning layout. */
 export interface WhyNotLighter {
@@ -12,12 +13,15 @@ export interface WhyNotLighter {
   readonly failing: Readonly<Partial<Record<CheckId, number>>>;
   /** Those nearest to passing, nearest first. */
   readonly nearest: readonly Assessment[];
+  /** The single change that would let the nearest pass; null when there is none. */
+  readonly rescue: Rescue | null;
 }
 
 const NEAREST_SHOWN = 5;
 
 /** Assesses every shape lighter than the winner on the winner's layout. */
-export function whyNotLighter({ bridge, space }: Prepared, winner: Option): WhyNotLighter {
+export function whyNotLighter(prepared: Prepared, winner: Option): WhyNotLighter {
+  const { bridge, space } = prepared;
   const { assessor } = winner;
   const lighter = space.steels.filter(({ shape }) => shape.weightPlf < winner.steel.shape.weightPlf);
   const failing: Partial<Record<CheckId, number>> = {};
@@ -28,14 +32,16 @@ export function whyNotLighter({ bridge, space }: Prepared, winner: Option): WhyN
       const ids = new Set<CheckId>();
       assessor.slots.forEach(({ id, kind }, place) => {
         const ratio = assessor.ratios[place];
-        if (kind !== "advisory" && ratio !== -1 && !(ratio <= 1)) ids.add(id);
+        if (kind !== "advisory" && ratio !== ABSENT && !(ratio <= 1)) ids.add(id);
       });
       for (const id of ids) failing[id] = (failing[id] ?? 0) + 1;
       return { steel, ratio: assessor.governingRatio };
     });
-  const nearest = missed
-    .sort((a, b) => a.ratio - b.ratio || a.steel.shape.weightPlf - b.steel.shape.weightPlf)
-    .slice(0, NEAREST_SHOWN)
-    .map(({ steel }) => assessInFull(bridge, assessor, steel));
-  return { lighterShapes: lighter.length, failing, nearest };
+  const nearest = missed.sort((a, b) => a.ratio - b.ratio || a.steel.shape.weightPlf - b.steel.shape.weightPlf).slice(0, NEAREST_SHOWN);
+  return {
+    lighterShapes: lighter.length,
+    failing,
+    nearest: nearest.map(({ steel }) => assessInFull(bridge, assessor, steel)),
+    rescue: nearest.length === 0 ? null : rescue(prepared, winner, nearest[0].steel),
+  };
 }

@@ -71,7 +71,6 @@ const yesNo = (nullable?: true): Field =>
 const words = (max: number, nullable?: true): Field =>
   orNull(
     {
-      // biome-ignore lint/suspicious/noControlCharactersInRegex: control characters are what is refused
       schema: z.string().regex(new RegExp(`^[^\\u0000-\\u001f]{0,${max}}$`)),
       allowed: `text of at most ${max} characters on one line`,
       fromText: (text) => text,

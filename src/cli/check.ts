@@ -12,10 +12,10 @@ import type { Flags } from "./options.js";
 
 /** `leanspan check SHAPE`: every number for one shape. */
 export async function runCheck(shape: string, flags: Flags, io: Io): Promise<ExitCode> {
-  const gathered = gather(flags, { bridge: "layout", shapes: true, shape });
+  const { question, remarks } = gather(flags, { bridge: "layout", shapes: true, shape });
   await checkTargets(flags);
-  for (const remark of gathered.remarks) io.stderr(`leanspan: ${remark}\n`);
-  const prepared = prepare(gathered);
+  for (const remark of remarks) io.stderr(`leanspan: ${remark}\n`);
+  const prepared = prepare(question);
   const { bridge, layouts } = prepared;
   const { inTheWay } = layouts;
   const answer = inTheWay.length > 0 ? null : check(prepared, shape);

@@ -10,10 +10,10 @@ import type { Flags } from "./options.js";
 
 /** `leanspan counts`: how many stringers across the deck. */
 export async function runCounts(flags: Flags, io: Io): Promise<ExitCode> {
-  const gathered = gather(flags, { bridge: "width", shapes: true });
+  const { question, remarks } = gather(flags, { bridge: "width", shapes: true });
   await checkTargets(flags);
-  for (const remark of gathered.remarks) io.stderr(`leanspan: ${remark}\n`);
-  const prepared = prepare(gathered);
+  for (const remark of remarks) io.stderr(`leanspan: ${remark}\n`);
+  const prepared = prepare(question);
   const { bridge, layouts } = prepared;
   const answer = counts(prepared);
   await deliver(

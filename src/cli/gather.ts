@@ -1,6 +1,6 @@
-import type { Bridge } from "../bridge/bridge.js";
+import { ask, type Question } from "../answers/question.js";
 import { type FlagValue, flagLayer, type Layer, readLayer } from "../bridge/layers.js";
-import { type ResolveOptions, resolveBridge } from "../bridge/resolve.js";
+import type { ResolveOptions } from "../bridge/resolve.js";
 import { mergeLists } from "../catalogue/merge-lists.js";
 import { readShapes } from "../catalogue/read-shapes.js";
 import { designationKey, type Shape } from "../catalogue/shape.js";
@@ -12,9 +12,7 @@ import type { Flags } from "./options.js";
 
 /** Everything a command works from, read and checked. */
 export interface Gathered {
-  readonly bridge: Bridge;
-  readonly shapes: readonly Shape[];
-  readonly vehicles: readonly Vehicle[];
+  readonly question: Question;
   /** Remarks for stderr. */
   readonly remarks: readonly string[];
 }
@@ -67,9 +65,9 @@ export function gather(flags: Flags, needs: Needs): Gathered {
   const shapes = needs.shapes ? gatherShapes(flags, file, attempt, remarks) : [];
   if (needs.shape !== undefined && issues.length === 0) requireShape(needs.shape, shapes, issues);
   const layers = gatherLayers(flags, file, issues);
-  const bridge = attempt(() => resolveBridge(layers, { needs: needs.bridge, vehicles }), null);
-  if (issues.length > 0 || bridge === null) throw new InputError(issues);
-  return { bridge, shapes, vehicles, remarks };
+  const question = attempt(() => ask(layers, needs.bridge, shapes, vehicles), null);
+  if (issues.length > 0 || question === null) throw new InputError(issues);
+  return { question, remarks };
 }
 
 type ReadFile = (path: string) => string | null;

@@ -10,10 +10,10 @@ import type { Flags } from "./options.js";
 
 /** `leanspan lightest`: the lightest options that pass. */
 export async function runLightest(flags: Flags, io: Io): Promise<ExitCode> {
-  const gathered = gather(flags, { bridge: "layout", shapes: true });
+  const { question, remarks } = gather(flags, { bridge: "layout", shapes: true });
   await checkTargets(flags);
-  for (const remark of gathered.remarks) io.stderr(`leanspan: ${remark}\n`);
-  const prepared = prepare(gathered);
+  for (const remark of remarks) io.stderr(`leanspan: ${remark}\n`);
+  const prepared = prepare(question);
   const { bridge, layouts } = prepared;
   const answer = lightest(prepared, flags.top ?? 5);
   await deliver(

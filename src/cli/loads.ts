@@ -10,7 +10,7 @@ import type { Flags } from "./options.js";
 
 /** `leanspan loads`: what a vehicle does to a span. */
 export async function runLoads(flags: Flags, io: Io): Promise<ExitCode> {
-  const { bridge, vehicles } = gather(flags, { bridge: "span", shapes: false });
+  const { bridge, vehicles } = gather(flags, { bridge: "span", shapes: false }).question;
   await checkTargets(flags);
   const vehicle = vehicleNamed(vehicles, bridge.liveLoad.vehicle);
   const live = laneEffects(vehicle, bridge.spanFt);

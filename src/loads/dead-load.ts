@@ -29,11 +29,11 @@ export const haunchWeight = formula(
 /** Weight of stay-in-place forms between the flanges. Source: statics. */
 export const formsWeight = formula(
   "wforms",
-  "p * (T - bf / 12) / 1000",
+  "pf * (T - bf / 12) / 1000",
   "kip/ft",
   "statics",
-  ["p", "T", "bf"],
-  (p: number, T: number, bf: number) => (p * (T - bf / 12)) / 1000,
+  ["pf", "T", "bf"],
+  (pf: number, T: number, bf: number) => (pf * (T - bf / 12)) / 1000,
 );
 /** The shape and its miscellaneous steel. Source: common practice for the fraction. */
 export const steelWeight = formula(

@@ -40,8 +40,7 @@ export function bestLayout(assessors: readonly Assessor[], steel: Steel): Option
   let best: { readonly ranked: Ranked; readonly index: number } | null = null;
   const passes = assessors.map((assessor, index) => {
     if (!stands(assessor.layout, steel)) return false;
-    assessor.assess(steel, null);
-    if (!assessor.passes) return false;
+    if (!assessor.screen(steel)) return false;
     const ranked = { steel, layout: assessor.layout, governingRatio: assessor.governingRatio };
     if (best === null || byPreference(ranked, best.ranked) < 0) best = { ranked, index };
     return true;

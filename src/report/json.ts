@@ -2,11 +2,14 @@ import type { Assessment } from "../answers/assessment.js";
 import type { CheckAnswer } from "../answers/check.js";
 import type { CountsAnswer } from "../answers/counts.js";
 import type { LightestAnswer } from "../answers/lightest.js";
+import type { WhyNotLighter } from "../answers/why-not-lighter.js";
 import type { Bridge, BridgeValues } from "../bridge/bridge.js";
 import type { LaneEffects, SectionEffects } from "../loads/live-load.js";
 import type { Line, StringerAssessment } from "../specs/contract.js";
 import { assumptionsOf, loadsAssumptions } from "./assumptions.js";
+import { byHandLines } from "./by-hand.js";
 import { CAUTION } from "./caution.js";
+import { assumptionText, changeText, flippedText, restsOnText } from "./explanations.js";
 import { advisoryLines } from "./text/assessment-lines.js";
 import { noteText } from "./text/check.js";
 import { countReason } from "./text/counts.js";
@@ -49,8 +52,31 @@ export function lightestJson(bridge: Bridge, answer: LightestAnswer, inTheWay: I
     whyNotLighter:
       why === null
         ? null
-        : { lighterShapes: why.lighterShapes, failing: why.failing, nearest: why.nearest.map((one) => assessmentJson(one)), rescue: null },
+        : {
+            lighterShapes: why.lighterShapes,
+            failing: why.failing,
+            nearest: why.nearest.map((one) => assessmentJson(one)),
+            rescue: rescueJson(why),
+          },
+    byDepth: answer.byDepth.map((row) => ({ ...row, assessment: assessmentJson(row.assessment) })),
+    restsOn: answer.restsOn.map((found) => ({
+      assumption: assumptionText(found),
+      flippedTo: flippedText(found),
+      outcome: found.outcome,
+      assessment: assessmentJson(found.assessment),
+      instead: found.instead === null ? null : assessmentJson(found.instead),
+      key: found.key,
+      value: found.flippedTo,
+      sentence: restsOnText(found),
+    })),
+    byHand: answer.byHand === null ? [] : byHandLines(bridge, answer.byHand.assessment, answer.byHand.figures),
   };
+}
+
+function rescueJson({ rescue }: WhyNotLighter): unknown {
+  if (rescue === null) return null;
+  const { assessment, change, lighterThanAnswer } = rescue;
+  return { change: changeText(change), assessment: assessmentJson(assessment), lighterThanAnswer };
 }
 
 /** The document of `counts`. */

@@ -58,6 +58,9 @@ export interface Effects {
   distributionRule: string;
   liveMomentKipFt: number;
   liveShearKip: number;
+  /** Live moment with one lane loaded and the factor it comes by, where Group IA counts; else null. */
+  oneLaneLiveMomentKipFt: number | null;
+  oneLaneDistributionMoment: number | null;
   /** Shear at the bearing of all dead load, unfactored, kip. */
   deadShearKip: number;
   factoredMomentKipFt: number;
@@ -139,6 +142,11 @@ export interface Assessor {
   /** Place of the governing check in `ratios`. */
   readonly governingSlot: number;
   assess(steel: Steel, recorder: AssessmentRecorder | null): void;
+  /**
+   * Whether a shape passes, by the same checks ended at the first that fails. When it passes, the governing check stands in the fields as
+   * after `assess`; advisories that are only reported are left out of `ratios`.
+   */
+  screen(steel: Steel): boolean;
 }
 
 /** A design specification: what it is called, and how it prepares a layout's checks. */

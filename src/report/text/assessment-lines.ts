@@ -5,14 +5,20 @@ import { feetText, ratioText, shown } from "../numbers.js";
 import { type Style, WIDTH } from "./frame.js";
 import { table } from "./table.js";
 
-/** Stringers and spacing in words: "4 at 8.5 ft", or the spacing alone. */
+/** Stringers and spacing in words: "4 at 8.5", or the spacing alone. */
 export function layoutText({ layout }: Assessment): string {
-  return layout.count === null ? `at ${feetText(layout.spacingFt)} ft` : `${layout.count} at ${feetText(layout.spacingFt)} ft`;
+  return layout.count === null ? `at ${feetText(layout.spacingFt)}` : `${layout.count} at ${feetText(layout.spacingFt)}`;
 }
 
 /** The governing check in words: "exterior flexure". */
 export function governingText({ governing }: Assessment): string {
   return `${governing.position} ${governing.id}`;
+}
+
+/** The same for a narrow column, with the ratio: "ext flexure 0.93". */
+export function shortGoverning({ governing }: Assessment): string {
+  const id = governing.id === "live-load-deflection" ? "deflection" : governing.id;
+  return `${governing.position.slice(0, 3)} ${id} ${ratioText(governing.ratio)}`;
 }
 
 /** Required checks that an assessment fails: "flexure 1.08, overload 1.02", the worse position of each. */

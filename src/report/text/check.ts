@@ -16,7 +16,7 @@ export function checkText(bridge: Bridge, { assessment, layoutsTried }: CheckAns
     style.strong(firstLine(bridge)),
     ...bridgeLines(bridge),
     "",
-    `${assessment.shape} (${source.file}, line ${source.line}), Fy ${shown(assessment.fyKsi)} ksi, ${layoutText(assessment)}${overhang}: ${verdict}`,
+    `${assessment.shape} (${source.file}, line ${source.line}), Fy ${shown(assessment.fyKsi)} ksi, ${layoutText(assessment)} ft${overhang}: ${verdict}`,
     `Governing: ${governingText(assessment)}, ratio ${ratioText(assessment.governing.ratio)}`,
   ];
   if (layoutsTried > 1) {

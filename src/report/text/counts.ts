@@ -1,8 +1,8 @@
 import type { CountRow, CountsAnswer } from "../../answers/counts.js";
 import type { Bridge } from "../../bridge/bridge.js";
 import { assumptionsOf } from "../assumptions.js";
-import { feetText, ratioText, shown } from "../numbers.js";
-import { failingText, governingText } from "./assessment-lines.js";
+import { feetText, shown } from "../numbers.js";
+import { failingText, shortGoverning } from "./assessment-lines.js";
 import { bridgeLines, closing, firstLine, type Style, WIDTH } from "./frame.js";
 import { type InTheWay, noLayoutLines } from "./lightest.js";
 import { table, wrap } from "./table.js";
@@ -27,17 +27,16 @@ export function countsText(bridge: Bridge, answer: CountsAnswer, inTheWay: InThe
 function countTable(answer: CountsAnswer): string[] {
   return table(
     [
-      { title: "stringers", align: "right" },
-      { title: "spacing", align: "right" },
-      { title: "overhang", align: "right" },
+      { title: "count", align: "right" },
+      { title: "S ft", align: "right" },
+      { title: "over", align: "right" },
       { title: "shape", align: "left" },
       { title: "lb/ft", align: "right" },
       { title: "steel", align: "right" },
       { title: "psf", align: "right" },
       { title: "depth", align: "right" },
-      { title: "defl. in", align: "right" },
+      { title: "defl", align: "right" },
       { title: "governed by", align: "left" },
-      { title: "ratio", align: "right" },
     ],
     answer.counts.map(({ count, best }) => {
       const mark = `${count === answer.lightestCount ? "*" : ""}${count === answer.fewestWithin5Percent ? "+" : ""}`;
@@ -52,8 +51,7 @@ function countTable(answer: CountsAnswer): string[] {
         best.steel?.psfOfDeck?.toFixed(1) ?? "-",
         shown(best.depthIn),
         best.stringers[0].effects.deflectionIn.toFixed(2),
-        governingText(best).replace("interior ", "int ").replace("exterior ", "ext "),
-        ratioText(best.governing.ratio),
+        shortGoverning(best),
       ];
     }),
   );
@@ -69,7 +67,7 @@ function reasons({ counts }: CountsAnswer, style: Style): string[] {
 function marks({ lightestCount, fewestWithin5Percent }: CountsAnswer): string[] {
   if (lightestCount === null) return [];
   return wrap(
-    `* the lightest (${lightestCount}); + the fewest stringers within 5 % of it (${fewestWithin5Percent}). Steel is lb per ft of bridge; psf is all steel per ft2 of deck; depth in inches.`,
+    `* the lightest (${lightestCount}); + the fewest stringers within 5 % of it (${fewestWithin5Percent}). S is the spacing, over the overhang; steel is lb per ft of bridge, psf all steel per ft2 of deck; depth and live-load deflection in inches; int and ext are the interior and exterior stringer.`,
     WIDTH,
     "",
   );

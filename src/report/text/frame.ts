@@ -39,7 +39,8 @@ export function closing(assumptions: readonly string[]): string[] {
   return ["", "Assumptions", ...assumptions.flatMap((text) => bullet(text)), "", ...wrap(`Caution: ${CAUTION}`, WIDTH, "")];
 }
 
-function bullet(text: string): string[] {
+/** A sentence as an item of a list. */
+export function bullet(text: string): string[] {
   const [first, ...rest] = wrap(text, WIDTH, "  ");
   return [`- ${first.trimStart()}`, ...rest];
 }

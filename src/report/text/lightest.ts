@@ -1,11 +1,14 @@
 import type { Assessment } from "../../answers/assessment.js";
+import type { DepthRow } from "../../answers/by-depth.js";
 import type { LightestAnswer } from "../../answers/lightest.js";
 import type { WhyNotLighter } from "../../answers/why-not-lighter.js";
 import type { Bridge } from "../../bridge/bridge.js";
 import { assumptionsOf } from "../assumptions.js";
+import { byHandLines } from "../by-hand.js";
+import { changeText, restsOnText } from "../explanations.js";
 import { feetText, ratioText, shown } from "../numbers.js";
-import { advisoryLines, failingText, governingText, layoutText } from "./assessment-lines.js";
-import { bridgeLines, closing, firstLine, type Style, WIDTH } from "./frame.js";
+import { advisoryLines, failingText, governingText, layoutText, shortGoverning } from "./assessment-lines.js";
+import { bridgeLines, bullet, closing, firstLine, type Style, WIDTH } from "./frame.js";
 import { table, wrap } from "./table.js";
 
 /** Limits that leave no layout, as data of `layoutsOf`. */
@@ -18,6 +21,14 @@ export function lightestText(bridge: Bridge, answer: LightestAnswer, inTheWay: I
   if (answer.options.length === 0) lines.push(...nothing(answer.nearestMiss, inTheWay, style));
   else lines.push(...optionTable(answer), ...remarks(answer.options[0].assessment));
   if (answer.whyNotLighter !== null) lines.push("", ...whyNotLighterLines(answer.whyNotLighter, style));
+  if (answer.byDepth.length > 0) lines.push("", style.strong("Lightest by depth"), ...depthTable(answer.byDepth));
+  if (answer.restsOn.length > 0) {
+    lines.push("", style.strong("Rests on"), ...answer.restsOn.flatMap((found) => bullet(restsOnText(found))));
+  }
+  if (answer.byHand !== null) {
+    const { assessment, figures } = answer.byHand;
+    lines.push("", style.strong("By hand"), ...byHandLines(bridge, assessment, figures).flatMap(bullet));
+  }
   lines.push("", `Examined: ${layouts} layouts x ${shapes} shapes = ${candidates} candidates.`);
   return [...lines, ...closing(assumptionsOf(bridge)), ""].join("\n");
 }
@@ -32,10 +43,9 @@ function optionTable({ options }: LightestAnswer): string[] {
       { title: "shape", align: "left" },
       { title: "lb/ft", align: "right" },
       { title: "steel", align: "right" },
-      { title: "total kip", align: "right" },
+      { title: "kip", align: "right" },
       { title: "depth", align: "right" },
       { title: "governed by", align: "left" },
-      { title: "ratio", align: "right" },
     ],
     options.map(({ rank, assessment, spacingRangeFt }) => [
       String(rank),
@@ -47,19 +57,15 @@ function optionTable({ options }: LightestAnswer): string[] {
       assessment.steel === null ? "-" : assessment.steel.totalKip.toFixed(1),
       shown(assessment.depthIn),
       shortGoverning(assessment),
-      ratioText(assessment.governing.ratio),
     ]),
   );
 }
-
-const shortGoverning = (assessment: Assessment): string =>
-  governingText(assessment).replace("interior ", "int ").replace("exterior ", "ext ");
 
 function remarks(best: Assessment): string[] {
   const overhang = best.layout.overhangFt === null ? "" : ` Overhang ${feetText(best.layout.overhangFt)} ft.`;
   const lines = [
     ...wrap(
-      `Steel is lb per ft of bridge; total is pieces at full length with miscellaneous steel; depth in inches; spacings in ft.${overhang}`,
+      `Spacings in ft; steel is lb per ft of bridge, kip all steel with pieces at full length and miscellaneous steel; depth in inches; int and ext are the interior and exterior stringer.${overhang}`,
       WIDTH,
       "",
     ),
@@ -84,11 +90,32 @@ function nothing(nearest: Assessment | null, inTheWay: InTheWay, style: Style): 
   return [
     style.bad("Nothing passes."),
     ...wrap(
-      `Nearest: ${layoutText(nearest)}, ${nearest.shape}, ${governingText(nearest)} at ${ratioText(nearest.governing.ratio)}. It fails: ${failingText(nearest)}.`,
+      `Nearest: ${layoutText(nearest)} ft, ${nearest.shape}, ${governingText(nearest)} at ${ratioText(nearest.governing.ratio)}. It fails: ${failingText(nearest)}.`,
       WIDTH,
       "",
     ),
   ];
+}
+
+function depthTable(rows: readonly DepthRow[]): string[] {
+  return table(
+    [
+      { title: "nominal in", align: "right" },
+      { title: "shape", align: "left" },
+      { title: "stringers", align: "left" },
+      { title: "lb/ft", align: "right" },
+      { title: "extra", align: "right" },
+      { title: "governed by", align: "left" },
+    ],
+    rows.map(({ nominalDepthIn, assessment, extraPlfOfBridge }) => [
+      shown(nominalDepthIn),
+      assessment.shape,
+      layoutText(assessment),
+      shown(assessment.weightPlf),
+      shown(extraPlfOfBridge),
+      shortGoverning(assessment),
+    ]),
+  );
 }
 
 /** Says which limits leave no layout. */
@@ -113,6 +140,19 @@ function whyNotLighterLines(why: WhyNotLighter, style: Style): string[] {
       ],
       why.nearest.map((assessment) => [`  ${assessment.shape}`, shown(assessment.weightPlf), failingText(assessment)]),
     ),
+    ...rescueLines(why),
   );
   return lines;
+}
+
+function rescueLines({ rescue, nearest }: WhyNotLighter): string[] {
+  if (rescue === null) return wrap(`No single change lets ${nearest[0]?.shape ?? "one"} pass.`, WIDTH, "");
+  const { assessment, change, lighterThanAnswer } = rescue;
+  const weight = shown(assessment.steelPlfOfBridge ?? assessment.weightPlf);
+  const less = lighterThanAnswer ? "lighter than the answer" : "not lighter than the answer";
+  return wrap(
+    `${assessment.shape} would pass with ${changeText(change)}: ${shortGoverning(assessment)}, steel ${weight} lb/ft of bridge, ${less}.`,
+    WIDTH,
+    "",
+  );
 }

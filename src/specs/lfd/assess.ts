@@ -134,6 +134,11 @@ class NoncompositeStringers implements Assessor {
   readonly #unbracedIn: number;
   readonly #diaphragmsIn: number;
   readonly #capacity: FlexureCapacity = newFlexureCapacity();
+  readonly #advisoriesRequired: boolean;
+  /** Whether the run may end at the first failing required check. */
+  #screening = false;
+  /** Whether it has met one. */
+  #settled = false;
 
   constructor(design: Design, layout: Layout) {
     const { bridge, live } = design;
@@ -169,6 +174,7 @@ class NoncompositeStringers implements Assessor {
     };
     this.#kinds = CHECKS.map((slot) => kinds[slot]);
     this.#used = CHECKS.map((slot) => shown[slot] ?? true);
+    this.#advisoriesRequired = [bridge.advisories.depth, bridge.advisories.handling, bridge.advisories.overhang].includes("enforce");
     this.ratios = new Float64Array(this.positions.length * CHECKS.length).fill(ABSENT);
     this.slots = this.positions.flatMap((position) =>
       CHECKS.map((slot, place) => ({ position, id: slot === "bracing-advisory" ? "bracing" : slot, kind: this.#kinds[place] })),
@@ -208,8 +214,20 @@ class NoncompositeStringers implements Assessor {
   }
 
   assess(steel: Steel, recorder: AssessmentRecorder | null): void {
+    this.#screening = false;
+    this.#run(steel, recorder);
+  }
+
+  screen(steel: Steel): boolean {
+    this.#screening = true;
+    this.#run(steel, null);
+    return this.passes;
+  }
+
+  #run(steel: Steel, recorder: AssessmentRecorder | null): void {
     this.ratios.fill(ABSENT);
-    for (let index = 0; index < this.#stringers.length; index++) {
+    this.#settled = false;
+    for (let index = 0; index < this.#stringers.length && !this.#settled; index++) {
       this.#assessStringer(this.#stringers[index], index * CHECKS.length, steel, recorder);
     }
     this.#decide();
@@ -292,6 +310,7 @@ class NoncompositeStringers implements Assessor {
     } else {
       this.#check(base, "bracing-advisory", this.#unbracedIn / IN_PER_FT, DIAPHRAGMS_AT_MOST_FT, "ft", "10.20.1", recorder);
     }
+    if (this.#settled) return;
     const Zreq = requiredZ.of(Mu, Fy);
     recorder?.step(requiredZ, Zreq, Mu, Fy);
 
@@ -303,6 +322,7 @@ class NoncompositeStringers implements Assessor {
     recorder?.step(withoutBearingStiffeners, Vbs, Vcap);
     recorder?.support("10.33.2", Vu, Vbs);
 
+    if (this.#settled) return;
     recorder?.topic("overload");
     const fo = factors.overloadStress.of(Mo, Sx);
     recorder?.step(factors.overloadStress, fo, Mo, Sx);
@@ -312,16 +332,18 @@ class NoncompositeStringers implements Assessor {
     const Sreq = factors.requiredS.of(Mo, Fy);
     recorder?.step(factors.requiredS, Sreq, Mo, Fy);
 
+    if (this.#settled) return;
     recorder?.topic("deflection");
     const delta = this.#deflectionIn(stringer, shape, recorder);
     const dall = allowedDeflection.of(L, bridge.deflection.spanOver);
     recorder?.step(allowedDeflection, dall, L, bridge.deflection.spanOver);
     this.#check(base, "live-load-deflection", delta, dall, "in", "10.6.2", recorder);
 
+    if (this.#settled) return;
     recorder?.topic("fatigue");
     this.#checkFatigue(stringer, base, Sx, recorder);
     if (this.#used[PLACE["deck-pour"]]) this.#checkPour(stringer, base, shape, Fy, w1, recorder);
-    this.#advise(stringer, base, shape, recorder);
+    if (!this.#screening || this.#advisoriesRequired) this.#advise(stringer, base, shape, recorder);
 
     recorder?.effects({
       deadStage1Klf: w1,
@@ -340,6 +362,8 @@ class NoncompositeStringers implements Assessor {
       distributionRule: stringer.factors.moment.rule,
       liveMomentKipFt: ML,
       liveShearKip: VL,
+      oneLaneLiveMomentKipFt: vehicle.lighterThanH20 ? stringer.oneLaneMomentKipFt : null,
+      oneLaneDistributionMoment: vehicle.lighterThanH20 ? stringer.factors.oneLaneMoment.factor : null,
       deadShearKip: VD,
       factoredMomentKipFt: Mu,
       factoredShearKip: Vu,
@@ -490,6 +514,17 @@ class NoncompositeStringers implements Assessor {
     recorder.value("ry", shape.radiusYIn, "in", shape.designation);
     recorder.value("J", shape.torsionJIn4, "in4", shape.designation);
     recorder.value("h/tw", shape.webSlenderness, "-", "clear of the fillets, as the list prints it; for comparison with D/tw");
+    const { deck, barriers, steel, pour } = bridge;
+    if (deck.thicknessIn !== null) recorder.value("t", deck.thicknessIn, "in", "deck, total thickness");
+    recorder.value("th", deck.haunchWeightIn, "in", "haunch in the weight");
+    recorder.value("wb", barriers.weightKlf, "kip/ft", "one barrier");
+    recorder.value("pw", bridge.wearingPsf, "lb/ft2", "wearing surface");
+    if (deck.deckPsf !== null) recorder.value("p", deck.deckPsf, "lb/ft2", "deck");
+    recorder.value("pf", deck.formsPsf, "lb/ft2", "forms that stay in place");
+    recorder.value("c", steel.miscFraction, "-", "miscellaneous steel, fraction of the shape");
+    recorder.value("q", pour.constructionPsf, "lb/ft2", "construction load at the pour");
+    recorder.value("a", bridge.pieceOverlapFt, "ft", "piece beyond the bearing at either end");
+    recorder.value("E", STEEL_MODULUS_KSI, "ksi", "steel");
     recorder.topic("live-load");
     const train = live.momentOfTrain;
     if (train !== null) {
@@ -524,6 +559,7 @@ class NoncompositeStringers implements Assessor {
     if (!this.#used[place]) return;
     const ratio = demand / capacity;
     this.ratios[base + place] = ratio;
+    if (this.#screening && !(ratio <= 1) && this.#kinds[place] !== "advisory") this.#settled = true;
     recorder?.check({ id: this.slots[base + place].id, kind: this.#kinds[place], article, demand, capacity, unit, ratio, ok: ratio <= 1 });
   }
 

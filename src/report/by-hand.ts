@@ -1,0 +1,37 @@
+import type { Assessment } from "../answers/assessment.js";
+import type { Bridge } from "../bridge/bridge.js";
+import { feetText, shown } from "./numbers.js";
+
+/**
+ * Four lines that anyone can repeat on a calculator, for the governing stringer: w, wL^2/8, the tabulated live moment times factor and
+ * impact, and the Z or S required against the shape's.
+ *
+ * @param shape figures of the shape: Zx and Sx, in3
+ */
+export function byHandLines(
+  bridge: Bridge,
+  assessment: Assessment,
+  shape: { readonly plasticModulusXIn3: number; readonly sectionModulusXIn3: number },
+): string[] {
+  const stringer = assessment.stringers.find(({ position }) => position === assessment.governing.position) ?? assessment.stringers[0];
+  const { effects, checks } = stringer;
+  const L = feetText(bridge.spanFt);
+  const w = effects.deadStage1Klf + effects.deadStage2Klf + effects.deadWearingKlf;
+  const MD = effects.momentStage1KipFt + effects.momentStage2KipFt + effects.momentWearingKipFt;
+  const lighter = effects.oneLaneLiveMomentKipFt;
+  const groupIA = lighter !== null && 2.2 * lighter > 1.67 * effects.liveMomentKipFt;
+  const ML = groupIA ? lighter : effects.liveMomentKipFt;
+  const factor = groupIA ? (effects.oneLaneDistributionMoment ?? 0) : effects.distributionMoment;
+  const lanes = groupIA ? ", one lane loaded (Group IA)" : "";
+  const compact = checks.find(({ id }) => id === "flexure")?.article === "10.48.1";
+  const live = groupIA ? "2.20" : compact ? "1.67" : "5/3";
+  const need = compact
+    ? `Z: 12 x 1.3 x (${shown(MD)} + ${live} x ${shown(ML)}) / ${shown(assessment.fyKsi)} = ${shown(effects.requiredZIn3 ?? 0)} in3 required (flexure), ${assessment.shape} has Zx ${shown(shape.plasticModulusXIn3)} in3`
+    : `S: 12 x (${shown(MD)} + ${live} x ${shown(ML)}) / (0.80 x ${shown(assessment.fyKsi)}) = ${shown(effects.requiredSIn3 ?? 0)} in3 required (overload), ${assessment.shape} has Sx ${shown(shape.sectionModulusXIn3)} in3`;
+  return [
+    `w = ${shown(effects.deadStage1Klf)} (deck and steel) + ${shown(effects.deadStage2Klf)} (barriers) + ${shown(effects.deadWearingKlf)} (wearing) = ${shown(w)} kip/ft on the ${stringer.position} stringer`,
+    `wL^2/8 = ${shown(w)} x ${L}^2 / 8 = ${shown(MD)} kip-ft dead moment`,
+    `Live: ${shown(effects.liveMomentPerLaneKipFt)} kip-ft (${bridge.liveLoad.vehicle} table, one lane) / 2 x ${shown(factor)} wheel lines x ${shown(1 + effects.impact)} impact = ${shown(ML)} kip-ft${lanes}`,
+    need,
+  ];
+}

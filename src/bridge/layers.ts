@@ -91,7 +91,7 @@ export function flagLayer(flags: readonly FlagValue[]): Layer {
     }
     setBy.set(key, { flag, key, text });
     const checked = checkValue(key, field.fromText(text));
-    if ("issue" in checked) issues.push({ field: flag, ...checked.issue });
+    if ("issue" in checked) issues.push({ field: flag, ...checked.issue, allowed: field.allowed.replace(/, or null$/, "") });
     else values.set(key, checked.value);
   }
   return { source: "flag", values, issues, place: (key) => ({ field: setBy.get(key)?.flag ?? key }) };

@@ -52,15 +52,19 @@ export function layoutsOf(bridge: Bridge): Layouts {
   const given = { ...(count !== null && { count }), ...(spacingFt !== null && { spacingFt }) };
   const layouts: Layout[] = [];
   const stops = new Map<string, { key: string; limit: number; trials: number }>();
+  const overhangFollows = count !== null && spacingFt !== null;
   for (const stringers of counts) {
     for (const spacing of spacings) {
       const overhangFt = tidy((outToOutFt - (stringers - 1) * spacing) / 2);
-      const broken = brokenBy(bridge, { ...given, overhangFt, perSpacing: overhangFt / spacing });
-      const stop = broken.find(({ key }) => key.includes("verhang"));
-      if (stop !== undefined && (count === null || spacingFt === null)) {
-        const seen = stops.get(stop.key) ?? { key: stop.key, limit: stop.limit, trials: 0 };
-        stops.set(stop.key, { ...seen, trials: seen.trials + 1 });
-      } else layouts.push({ count: stringers, spacingFt: spacing, overhangFt, broken });
+      const stop = overhangFollows ? null : overhangStop(bridge, overhangFt, spacing);
+      if (stop === null) {
+        const broken = brokenBy(bridge, overhangFollows ? { ...given, overhangFt, perSpacing: overhangFt / spacing } : given);
+        layouts.push({ count: stringers, spacingFt: spacing, overhangFt, broken });
+      } else {
+        const seen = stops.get(stop);
+        if (seen === undefined) stops.set(stop, { key: `stringers.${stop}`, limit: rules[stop], trials: 1 });
+        else seen.trials++;
+      }
     }
   }
   if (layouts.length > 0) return { layouts, inTheWay: [] };
@@ -76,6 +80,15 @@ function grid(bridge: Bridge, mostFt: number): number[] {
   const { minSpacingFt, spacingStepFt } = bridge.stringers;
   const steps = Math.floor((mostFt - minSpacingFt + INCLUSIVE_FT) / spacingStepFt);
   return range(0, steps).map((step) => tidy(minSpacingFt + step * spacingStepFt));
+}
+
+type OverhangLimit = "minOverhangFt" | "maxOverhangFt" | "maxOverhangPerSpacing";
+
+/** The limit an overhang breaks, or null. */
+function overhangStop({ stringers }: Bridge, overhangFt: number, spacingFt: number): OverhangLimit | null {
+  if (overhangFt < stringers.minOverhangFt - INCLUSIVE_FT) return "minOverhangFt";
+  if (overhangFt > stringers.maxOverhangFt + INCLUSIVE_FT) return "maxOverhangFt";
+  return overhangFt / spacingFt > stringers.maxOverhangPerSpacing + INCLUSIVE_FT ? "maxOverhangPerSpacing" : null;
 }
 
 interface LayoutValues {

@@ -44,23 +44,8 @@ const KEY_OF_FLAG = {
  * @throws {InputError} with the faults of all of them together
  */
 export function gather(flags: Flags, needs: Needs): Gathered {
-  const issues: InputIssue[] = [];
   const remarks: string[] = [];
-  const attempt = <T>(work: () => T, instead: T): T => {
-    try {
-      return work();
-    } catch (error) {
-      if (!(error instanceof InputError)) throw error;
-      issues.push(...error.issues);
-      return instead;
-    }
-  };
-  const file = (path: string): string | null => {
-    const reading = readText(path);
-    if ("text" in reading) return reading.text;
-    issues.push(reading.issue);
-    return null;
-  };
+  const { issues, attempt, file } = collector();
   const vehicles = gatherVehicles(flags, file, attempt);
   const shapes = needs.shapes ? gatherShapes(flags, file, attempt, remarks) : [];
   if (needs.shape !== undefined && issues.length === 0) requireShape(needs.shape, shapes, issues);
@@ -68,6 +53,29 @@ export function gather(flags: Flags, needs: Needs): Gathered {
   const question = attempt(() => ask(layers, needs.bridge, shapes, vehicles), null);
   if (issues.length > 0 || question === null) throw new InputError(issues);
   return { question, remarks };
+}
+
+/** Reads and works on, keeping every fault met for one message at the end. */
+function collector(): { readonly issues: InputIssue[]; readonly attempt: Attempt; readonly file: ReadFile } {
+  const issues: InputIssue[] = [];
+  return {
+    issues,
+    attempt: (work, instead) => {
+      try {
+        return work();
+      } catch (error) {
+        if (!(error instanceof InputError)) throw error;
+        issues.push(...error.issues);
+        return instead;
+      }
+    },
+    file: (path) => {
+      const reading = readText(path);
+      if ("text" in reading) return reading.text;
+      issues.push(reading.issue);
+      return null;
+    },
+  };
 }
 
 type ReadFile = (path: string) => string | null;
@@ -83,6 +91,11 @@ function gatherVehicles(flags: Flags, file: ReadFile, attempt: Attempt): readonl
 }
 
 function gatherShapes(flags: Flags, file: ReadFile, attempt: Attempt, remarks: string[]): readonly Shape[] {
+  const all = readLists(flags, file, attempt, remarks);
+  return all.length === 0 ? all : attempt(() => selectShapes(all, flags), []);
+}
+
+function readLists(flags: Flags, file: ReadFile, attempt: Attempt, remarks: string[]): readonly Shape[] {
   const bundled = (): readonly Shape[] => readShapes(readShipped("w-shapes.csv"), "w-shapes.csv", { bundled: true }).shapes;
   const lists = (flags.sections ?? ["bundled"]).map((path): readonly Shape[] => {
     if (path === "bundled") return bundled();
@@ -91,29 +104,44 @@ function gatherShapes(flags: Flags, file: ReadFile, attempt: Attempt, remarks: s
     remarks.push(...(list?.remarks ?? []));
     return list?.shapes ?? [];
   });
-  const all = attempt(() => mergeLists(lists), []);
-  if (all.length === 0) return all;
-  return attempt(() => selectShapes(all, flags), []);
+  return attempt(() => mergeLists(lists), []);
 }
 
-/** Shapes whose name matches the patterns of --shapes and none of --without. */
-function selectShapes(shapes: readonly Shape[], flags: Flags): readonly Shape[] {
-  const matching = (patterns: readonly string[]) => {
+/**
+ * The list in use with the patterns applied, for a command that lists shapes: leaving none is an answer there.
+ *
+ * @throws {InputError} with the faults of every list
+ */
+export function gatherList(flags: Flags): {
+  readonly shapes: readonly Shape[];
+  readonly inList: number;
+  readonly remarks: readonly string[];
+} {
+  const remarks: string[] = [];
+  const { issues, attempt, file } = collector();
+  const all = readLists(flags, file, attempt, remarks);
+  if (issues.length > 0) throw new InputError(issues);
+  return { shapes: matching(all, flags), inList: all.length, remarks };
+}
+
+/** Shapes whose name matches the patterns of --shapes, if any, and none of --without. */
+function matching(shapes: readonly Shape[], flags: Flags): readonly Shape[] {
+  const matches = (patterns: readonly string[]) => {
     const expressions = patterns.map(patternExpression);
-    return (shape: Shape): boolean => expressions.some((expression) => expression.test(designationKey(shape.designation)));
+    return ({ designation }: Shape): boolean => expressions.some((expression) => expression.test(designationKey(designation)));
   };
-  const wanted = flags.shapes === undefined ? shapes : shapes.filter(matching(flags.shapes));
-  const kept = flags.without === undefined ? wanted : wanted.filter((shape) => !matching(flags.without ?? [])(shape));
+  const wanted = flags.shapes === undefined ? shapes : shapes.filter(matches(flags.shapes));
+  const unwanted = matches(flags.without ?? []);
+  return wanted.filter((shape) => !unwanted(shape));
+}
+
+function selectShapes(shapes: readonly Shape[], flags: Flags): readonly Shape[] {
+  const kept = matching(shapes, flags);
   if (kept.length > 0) return kept;
   const names = shapes.map(({ designation }) => designation);
   const hint = (flags.shapes ?? []).map((pattern) => didYouMean(pattern, names)).find((text) => text !== "") ?? "";
-  throw new InputError([
-    {
-      field: flags.shapes === undefined ? "--without" : "--shapes",
-      problem: `no shape of the list is left${hint}`,
-      allowed: "a pattern such as W30X*",
-    },
-  ]);
+  const field = flags.shapes === undefined ? "--without" : "--shapes";
+  throw new InputError([{ field, problem: `no shape of the list is left${hint}`, allowed: "a pattern such as W30X*" }]);
 }
 
 function patternExpression(pattern: string): RegExp {

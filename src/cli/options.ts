@@ -19,6 +19,9 @@ export interface Flags {
   readonly composite?: boolean;
   /** Both spellings of the composite flag as met, so that a contradiction is seen. */
   readonly compositeWords?: string[];
+  readonly minDepth?: string[];
+  readonly minWeight?: string[];
+  readonly maxWeight?: string[];
   readonly shapes?: string[];
   readonly without?: string[];
   readonly set?: string[];
@@ -58,7 +61,6 @@ export function addBridgeFlags(command: Command): Command {
 /** Flags of the commands that choose or check stringers. */
 export function addStringerFlags(command: Command): Command {
   addBridgeFlags(command)
-    .addOption(list("--sections <file>", "a list of shapes instead of the catalogue; repeatable; `bundled` adds the catalogue"))
     .addOption(list("--width <ft>", "deck from edge to edge"))
     .addOption(list("--count <n>", "stringers across the deck"))
     .addOption(list("--spacing <ft>", "stringer spacing"))
@@ -67,15 +69,32 @@ export function addStringerFlags(command: Command): Command {
     .option("--composite", "the deck acts with the stringers")
     .option("--no-composite", "it does not")
     .addOption(list("--dead <kip/ft>", "all dead load on each stringer but its own steel"))
-    .addOption(list("--max-depth <in>", "greatest depth of a shape"))
-    .addOption(list("--shapes <pattern>", "only shapes of this name, * and ? as wildcards; repeatable"))
-    .addOption(list("--without <pattern>", "no shapes of this name; repeatable"));
+    .addOption(list("--max-depth <in>", "greatest depth of a shape"));
+  addListFlags(command);
   const words: string[] = [];
   const noted = (word: string) => () => {
     words.push(word);
     command.setOptionValue("compositeWords", words);
   };
   return command.on("option:composite", noted("--composite")).on("option:no-composite", noted("--no-composite"));
+}
+
+/** Flags that choose among the shapes of a list. */
+function addListFlags(command: Command): Command {
+  return command
+    .addOption(list("--sections <file>", "a list of shapes instead of the catalogue; repeatable; `bundled` adds the catalogue"))
+    .addOption(list("--shapes <pattern>", "only shapes of this name, * and ? as wildcards; repeatable"))
+    .addOption(list("--without <pattern>", "no shapes of this name; repeatable"));
+}
+
+/** Flags of the command that lists shapes. */
+export function addSectionFlags(command: Command): Command {
+  return addListFlags(command)
+    .addOption(list("--min-depth <in>", "least depth"))
+    .addOption(list("--max-depth <in>", "greatest depth"))
+    .addOption(list("--min-weight <lb/ft>", "least weight"))
+    .addOption(list("--max-weight <lb/ft>", "greatest weight"))
+    .addOption(list("--fy <ksi>", "least yield stress of the row's own steel; catalogue shapes come to 50"));
 }
 
 /** How the answer is handed over. */

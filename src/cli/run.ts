@@ -1,7 +1,7 @@
 import { Command, CommanderError } from "commander";
 import { InputError } from "../errors.js";
 import { EXIT, type ExitCode, type Io } from "./io.js";
-import { addBridgeFlags, addOutputFlags, addStringerFlags, addTopFlag, type Flags } from "./options.js";
+import { addBridgeFlags, addOutputFlags, addSectionFlags, addStringerFlags, addTopFlag, type Flags } from "./options.js";
 
 /**
  * Runs the command line: arguments to options to answer to exit code.
@@ -77,6 +77,21 @@ function build(io: Io, done: (code: ExitCode) => void): Command {
   addOutputFlags(
     addBridgeFlags(add("loads", "what a vehicle does to a simple span", ["loads --span 60", "loads --span 80 --vehicle HL-93 --json"])),
   ).action(async (flags: Flags) => done(await (await import("./loads.js")).runLoads(flags, io)));
+
+  addOutputFlags(
+    addSectionFlags(
+      add("sections", "the shapes of the list in use", ["sections --shapes 'W30X*'", "sections --max-depth 24 --max-weight 100 --json"]),
+    ),
+  ).action(async (flags: Flags) => done(await (await import("./sections.js")).runSections(flags, io)));
+
+  addStringerFlags(
+    add("init", "a starting bridge file with every key", [
+      "init otter-creek.json --span 62 --width 30 --force",
+      "init forest-road.json --span 40 --width 16 --vehicle H15-44 --force",
+    ]).argument("<file>", "file to be written"),
+  )
+    .option("--force", "replace an existing file")
+    .action(async (file: string, flags: Flags) => done(await (await import("./init.js")).runInit(file, flags, io)));
 
   return program;
 }

@@ -1,6 +1,7 @@
 import type { Assessment } from "../answers/assessment.js";
 import type { CountsAnswer } from "../answers/counts.js";
 import type { LightestAnswer } from "../answers/lightest.js";
+import type { Shape } from "../catalogue/shape.js";
 import type { SectionEffects } from "../loads/live-load.js";
 import type { StringerAssessment } from "../specs/contract.js";
 
@@ -41,6 +42,11 @@ export function checkRows(assessment: Assessment): CsvRecord[] {
 /** One row a tenth point. */
 export function loadRows(tenthPoints: readonly SectionEffects[]): CsvRecord[] {
   return tenthPoints.map((point) => ({ ...point }));
+}
+
+/** One row a shape, in our own columns, so that the file can be read again as a list. */
+export function sectionRows(shapes: readonly Shape[]): CsvRecord[] {
+  return shapes.map(({ designation, source: _, bundled: __, yieldStressKsi, ...figures }) => ({ designation, ...figures, yieldStressKsi }));
 }
 
 function assessmentRow(assessment: Assessment): CsvRecord {

@@ -4,6 +4,7 @@ import type { CountsAnswer } from "../answers/counts.js";
 import type { LightestAnswer } from "../answers/lightest.js";
 import type { WhyNotLighter } from "../answers/why-not-lighter.js";
 import type { Bridge, BridgeValues } from "../bridge/bridge.js";
+import type { Shape } from "../catalogue/shape.js";
 import type { LaneEffects, SectionEffects } from "../loads/live-load.js";
 import type { Line, StringerAssessment } from "../specs/contract.js";
 import { assumptionsOf, loadsAssumptions } from "./assumptions.js";
@@ -117,6 +118,24 @@ export function checkJson(bridge: Bridge, answer: CheckAnswer | null, inTheWay: 
 export function loadsJson(bridge: Bridge, live: LaneEffects, tenthPoints: readonly SectionEffects[]): unknown {
   const { momentOfTrain: _, endPlaces: __, lane: ___, ...loads } = live;
   return { ...frame("loads", bridge, loadsAssumptions(bridge)), loads: { ...loads, tenthPoints } };
+}
+
+/** The document of `sections`. */
+export function sectionsJson(shapes: readonly Shape[], inList: number): unknown {
+  return {
+    schemaVersion: SCHEMA_VERSION,
+    command: "sections",
+    caution: CAUTION,
+    inList,
+    sections: shapes.map(({ designation, source, yieldStressKsi, bundled, ...figures }) => ({
+      designation,
+      file: source.file,
+      line: source.line,
+      bundled,
+      yieldStressKsi,
+      ...figures,
+    })),
+  };
 }
 
 function assessmentJson(assessment: Assessment): Record<string, unknown> {

@@ -81,17 +81,32 @@ interface LeverArrangement {
  */
 export function leverInterior(spacingFt: number, mostTrucks: number): LeverArrangement {
   const S = spacingFt;
-  let best: LeverArrangement = { factor: 0, reduction: 1, trucks: 0, distancesFt: [] };
+  let best = { factor: 0, reduction: 1, trucks: 0, shift: 0 };
   for (let trucks = 1; trucks <= mostTrucks; trucks++) {
     const wheels = wheelsFt(trucks);
     const reduction = laneReduction(trucks);
-    for (const shift of wheels.flatMap((wheel) => [-S - wheel, -wheel, S - wheel])) {
-      const distancesFt = wheels.map((wheel) => Math.abs(wheel + shift)).filter((distance) => distance < S);
-      const factor = reduction * distancesFt.reduce((sum, distance) => sum + (S - distance) / S, 0);
-      if (factor > best.factor) best = { factor, reduction, trucks, distancesFt };
+    for (const wheel of wheels) {
+      for (let side = -1; side <= 1; side++) {
+        const shift = side * S - wheel;
+        const factor = reduction * triangleSum(wheels, shift, S);
+        if (factor > best.factor) best = { factor, reduction, trucks, shift };
+      }
     }
   }
-  return best;
+  const distancesFt = wheelsFt(best.trucks)
+    .map((wheel) => Math.abs(wheel + best.shift))
+    .filter((distance) => distance < S);
+  return { factor: best.factor, reduction: best.reduction, trucks: best.trucks, distancesFt };
+}
+
+/** Sum over the wheels of a triangle of height 1 over the stringer and 0 at its neighbours. */
+function triangleSum(wheels: readonly number[], shift: number, S: number): number {
+  let sum = 0;
+  for (const wheel of wheels) {
+    const distance = Math.abs(wheel + shift);
+    if (distance < S) sum += (S - distance) / S;
+  }
+  return sum;
 }
 
 /**

@@ -1,6 +1,6 @@
 import type { Bridge } from "../bridge/bridge.js";
 import type { Specification } from "./contract.js";
-import { lfd } from "./lfd/assess.js";
+import { lfd } from "./lfd/lfd.js";
 
 /**
  * The specification a bridge asks for.

@@ -54,9 +54,23 @@ export const effectiveShearFactor = formula(
 );
 
 const groupI = (symbol: string, dead: string, live: string, unit: string) =>
-  formula(symbol, `1.3 * (${dead} + 1.67 * ${live})`, unit, "3.22, Group I", [dead, live], (D: number, L: number) => 1.3 * (D + 1.67 * L));
+  formula(
+    symbol,
+    `1.3 * (${dead} + 1.67 * ${live})`,
+    unit,
+    "3.22, Group I",
+    [dead, live],
+    (D: number, L: number) => 1.3 * (D + GROUP_I_LIVE * L),
+  );
 const groupIA = (symbol: string, dead: string, live: string, unit: string) =>
-  formula(symbol, `1.3 * (${dead} + 2.20 * ${live})`, unit, "3.22, Group IA", [dead, live], (D: number, L: number) => 1.3 * (D + 2.2 * L));
+  formula(
+    symbol,
+    `1.3 * (${dead} + 2.20 * ${live})`,
+    unit,
+    "3.22, Group IA",
+    [dead, live],
+    (D: number, L: number) => 1.3 * (D + GROUP_IA_LIVE * L),
+  );
 
 /** Factored moment and shear, Group I. Source: AASHTO Standard Specifications, 17th ed., Table 3.22.1A. */
 export const factoredMoment = groupI("Mu", "MD", "ML", "kip-ft");
@@ -65,23 +79,13 @@ export const factoredShear = groupI("Vu", "VD", "VL", "kip");
 export const factoredMomentIA = groupIA("MuIA", "MD", "ML1", "kip-ft");
 export const factoredShearIA = groupIA("VuIA", "VD", "VL1", "kip");
 
-/** Overload moment. Source: AASHTO Standard Specifications, 17th ed., Art. 10.57. */
-export const overloadMoment = formula(
-  "Mo",
-  "MD + 5 / 3 * ML",
-  "kip-ft",
-  "10.57",
-  ["MD", "ML"],
-  (MD: number, ML: number) => MD + (5 / 3) * ML,
-);
-export const overloadMomentIA = formula(
-  "MoIA",
-  "MD + 2.20 * ML1",
-  "kip-ft",
-  "10.57",
-  ["MD", "ML1"],
-  (MD: number, ML1: number) => MD + 2.2 * ML1,
-);
+/** Live load factors before the common 1.3, and that of overload. Source: AASHTO Standard Specifications, 17th ed., Table 3.22.1A, Art. 10.57. */
+export const GROUP_I_LIVE = 1.67;
+export const GROUP_IA_LIVE = 2.2;
+export const OVERLOAD_LIVE = 5 / 3;
+
+/** Overload moment; fL is the live moment times 5/3, or for light vehicles times 2.20 with one lane loaded if that is more. Source: AASHTO Standard Specifications, 17th ed., Art. 10.57. */
+export const overloadMoment = formula("Mo", "MD + fL", "kip-ft", "10.57", ["MD", "fL"], (MD: number, fL: number) => MD + fL);
 /** Overload stress. Source: AASHTO Standard Specifications, 17th ed., Art. 10.57.1. */
 export const overloadStress = formula("fo", "12 * Mo / Sx", "ksi", "10.57.1", ["Mo", "Sx"], (Mo: number, Sx: number) => (12 * Mo) / Sx);
 export const overloadLimit = formula("Fo", "0.80 * Fy", "ksi", "10.57.1", ["Fy"], (Fy: number) => 0.8 * Fy);

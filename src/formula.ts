@@ -37,12 +37,15 @@ export type Topic =
   | "live-load"
   | "distribution"
   | "effects"
+  | "composite-section"
   | "flexure"
   | "shear"
   | "overload"
   | "deflection"
   | "fatigue"
   | "deck-pour"
+  | "studs"
+  | "supports"
   | "advisories";
 
 /**

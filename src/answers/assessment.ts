@@ -1,7 +1,18 @@
 import type { Bridge } from "../bridge/bridge.js";
 import type { BrokenLimit } from "../bridge/layouts.js";
 import type { Steel } from "../bridge/yield-stress.js";
-import type { AssessmentRecorder, Assessor, Check, CheckId, Effects, Line, Note, Position, StringerAssessment } from "../specs/contract.js";
+import type {
+  AssessmentRecorder,
+  Assessor,
+  Check,
+  CheckId,
+  Effects,
+  Line,
+  Note,
+  Position,
+  StringerAssessment,
+  StudCount,
+} from "../specs/contract.js";
 import { LB_PER_KIP } from "../units.js";
 
 /** A candidate with its checks, as answers show it. */
@@ -65,6 +76,7 @@ interface Draft {
   readonly lines: Line[];
   effects: Effects | null;
   support: StringerAssessment["support"] | null;
+  studs: StudCount | null;
 }
 
 class Recording implements AssessmentRecorder {
@@ -77,7 +89,7 @@ class Recording implements AssessmentRecorder {
   }
 
   stringer(position: Position): void {
-    this.#drafts.push({ position, checks: [], notes: [], lines: [], effects: null, support: null });
+    this.#drafts.push({ position, checks: [], notes: [], lines: [], effects: null, support: null, studs: null });
   }
   topic(topic: Parameters<AssessmentRecorder["topic"]>[0]): void {
     this.#draft.lines.push({ type: "topic", topic });
@@ -101,11 +113,15 @@ class Recording implements AssessmentRecorder {
   support(article: string, shearKip: number, withoutStiffenersKip: number): void {
     this.#draft.support = { article, shearKip, withoutStiffenersKip, stiffenersNeeded: !(shearKip <= withoutStiffenersKip) };
   }
+  studs(article: string, forceKip: number, strengthKip: number, perHalfSpan: number, perRow: number): void {
+    const whole = Math.ceil(perHalfSpan / perRow - 1e-9) * perRow;
+    this.#draft.studs = { article, forceKip, strengthKip, perHalfSpan: whole, perStringer: 2 * whole };
+  }
 
   stringers(): readonly StringerAssessment[] {
-    return this.#drafts.map(({ position, effects, support, checks, notes, lines }) => {
+    return this.#drafts.map(({ position, effects, support, studs, checks, notes, lines }) => {
       if (effects === null || support === null) throw new RangeError(`the ${position} stringer was not finished`);
-      return { position, effects, checks, support, notes, lines };
+      return { position, effects, checks, support, studs, notes, lines };
     });
   }
 }

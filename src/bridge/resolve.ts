@@ -250,9 +250,6 @@ class Draft {
     if (this.#values.get("specification") === "lrfd") {
       this.#fault("specification", "the lrfd checks are not built yet", "lfd");
     }
-    if (composite && kind === "concrete") {
-      this.#fault("deck.composite", "the checks of composite stringers are not built yet", "false (--no-composite)");
-    }
     if (this.#values.get("liveLoad.vehicle") === "HL-93" && needs !== "span") {
       this.#fault("liveLoad.vehicle", "HL-93 belongs to lrfd", "a truck or lane loading of the Standard Specifications");
     }

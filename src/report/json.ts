@@ -143,8 +143,8 @@ function assessmentJson(assessment: Assessment): Record<string, unknown> {
   return { ...rest, advisories: advisoryLines(assessment), stringers: stringers.map(stringerJson) };
 }
 
-function stringerJson({ position, effects, checks, support, notes }: StringerAssessment): Record<string, unknown> {
-  return { position, effects, checks, support, notes: notes.map(noteText) };
+function stringerJson({ position, effects, checks, support, studs, notes }: StringerAssessment): Record<string, unknown> {
+  return { position, effects, checks, support, studs, notes: notes.map(noteText) };
 }
 
 function lineJson(line: Line): unknown {

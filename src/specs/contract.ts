@@ -92,6 +92,8 @@ export interface AssessmentRecorder extends Recorder {
   note(code: string, ...args: readonly (number | string)[]): void;
   /** Whether bearing stiffeners are needed: factored shear and the shear up to which none are, kip. */
   support(article: string, shearKip: number, withoutStiffenersKip: number): void;
+  /** Studs between midspan and either end by strength: the force they carry, the strength of one, how many, and how many stand in a row. */
+  studs(article: string, forceKip: number, strengthKip: number, perHalfSpan: number, perRow: number): void;
 }
 
 /** One line of a calculation as recorded. */
@@ -100,6 +102,16 @@ export type Line =
   | { readonly type: "step"; readonly formula: Formula; readonly numbers: readonly number[]; readonly result: number }
   | { readonly type: "value"; readonly symbol: string; readonly value: number; readonly unit: string; readonly from: string }
   | { readonly type: "check"; readonly check: Check };
+
+/** Studs that composite action needs by strength, whole rows. */
+export interface StudCount {
+  readonly article: string;
+  readonly forceKip: number;
+  readonly strengthKip: number;
+  /** Between midspan and either end, rounded up to whole rows. */
+  readonly perHalfSpan: number;
+  readonly perStringer: number;
+}
 
 /** A stringer's assessment in full. */
 export interface StringerAssessment {
@@ -112,6 +124,8 @@ export interface StringerAssessment {
     readonly withoutStiffenersKip: number;
     readonly stiffenersNeeded: boolean;
   };
+  /** Studs by strength; null for noncomposite stringers. */
+  readonly studs: StudCount | null;
   readonly notes: readonly Note[];
   readonly lines: readonly Line[];
 }

@@ -98,12 +98,15 @@ const TOPIC_WORDS: Readonly<Record<Topic, string>> = {
   "dead-load": "Dead load that the shape does not change",
   distribution: "Distribution to the stringer, wheel lines",
   effects: "Load effects",
+  "composite-section": "Composite section",
   flexure: "Flexure",
   shear: "Shear",
   overload: "Overload",
   deflection: "Live-load deflection",
   fatigue: "Fatigue",
   "deck-pour": "Deck pour on the bare shape",
+  studs: "Studs by strength",
+  supports: "Web at the supports",
   advisories: "Advisories",
 };
 

@@ -1,6 +1,6 @@
 import type { CheckAnswer } from "../../answers/check.js";
 import type { Bridge } from "../../bridge/bridge.js";
-import type { Note, StringerAssessment } from "../../specs/contract.js";
+import type { Effects, Note, StringerAssessment, StudCount } from "../../specs/contract.js";
 import { assumptionsOf } from "../assumptions.js";
 import { feetText, ratioText, shown } from "../numbers.js";
 import { checkTable, governingText, layoutText, stepLines } from "./assessment-lines.js";
@@ -39,7 +39,7 @@ export function checkText(bridge: Bridge, { assessment, layoutsTried }: CheckAns
 
 const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1);
 
-function supportLines({ support, effects }: StringerAssessment): string[] {
+function supportLines({ support, effects, studs }: StringerAssessment): string[] {
   const needed = support.stiffenersNeeded ? "needed" : "not needed";
   return [
     ...wrap(
@@ -48,11 +48,24 @@ function supportLines({ support, effects }: StringerAssessment): string[] {
       "",
     ),
     ...wrap(
-      `Reaction, unfactored: dead ${shown(effects.deadShearKip)} kip, live with impact ${shown(effects.liveShearKip)} kip. Required: Z ${shown(effects.requiredZIn3 ?? 0)} in3 (flexure, if compact), S ${shown(effects.requiredSIn3 ?? 0)} in3 (overload).`,
+      `Reaction, unfactored: dead ${shown(effects.deadShearKip)} kip, live with impact ${shown(effects.liveShearKip)} kip. ${requiredText(effects)}`,
       WIDTH,
       "",
     ),
+    ...(studs === null ? [] : wrap(studsText(studs), WIDTH, "")),
   ];
+}
+
+/** Studs by strength in words. */
+export function studsText({ perHalfSpan, perStringer, strengthKip, forceKip, article }: StudCount): string {
+  return `Studs by strength: ${perHalfSpan} in each half span, ${perStringer} a stringer (${shown(forceKip)} kip, ${shown(strengthKip)} kip a stud; ${article}); fatigue pitch not computed.`;
+}
+
+function requiredText({ requiredZIn3, requiredSIn3, plasticMomentKipFt, effectiveWidthIn }: Effects): string {
+  if (requiredZIn3 !== null && requiredSIn3 !== null) {
+    return `Required: Z ${shown(requiredZIn3)} in3 (flexure, if compact), S ${shown(requiredSIn3)} in3 (overload).`;
+  }
+  return `Effective slab ${shown(effectiveWidthIn ?? 0)} in wide, plastic moment ${shown(plasticMomentKipFt ?? 0)} kip-ft.`;
 }
 
 /** A note of the calculation in words. */
@@ -64,6 +77,12 @@ export function noteText({ code, args }: Note): string {
         noncompact: "Flexure: braced noncompact section (10.48.2).",
         "partially-braced": "Flexure: partially braced section (10.48.4).",
       }[String(args[0])] as string;
+    case "composite-route":
+      return `Flexure: composite section, ${
+        { plastic: "full plastic moment", reduced: "plastic moment reduced for ductility", "first-yield": "first-yield moment" }[
+          String(args[0])
+        ]
+      }; plastic neutral axis in the ${args[1]}.`;
     case "distribution":
       return `Distribution: moment by ${args[0]}, axle over the support by ${args[1]}.`;
     case "outside-flexure-rules":

@@ -30,6 +30,21 @@ export function formula<A extends number[]>(
   return { symbol, expression, unit, article, given, of };
 }
 
+/**
+ * The same formula under another symbol, with symbols of its inputs exchanged.
+ *
+ * @param symbols new name of each input that changes
+ */
+export function renamed<A extends number[]>(rule: Formula<A>, symbol: string, symbols: Readonly<Record<string, string>>): Formula<A> {
+  const rename = (name: string): string => symbols[name] ?? name;
+  return {
+    ...rule,
+    symbol,
+    expression: rule.expression.replace(/[A-Za-z][A-Za-z0-9]*/g, rename),
+    given: rule.given.map(rename) as unknown as Formula<A>["given"],
+  };
+}
+
 /** A heading under which steps of a calculation stand. The report has the words. */
 export type Topic =
   | "section"

@@ -16,7 +16,7 @@ export interface ResolveOptions {
 }
 
 /** Keys whose values belong to one kind of deck and never pass to another. */
-const DECK_BOUND: readonly string[] = [
+export const DECK_BOUND: readonly string[] = [
   "deck.thicknessIn",
   "deck.sacrificialIn",
   "deck.haunchWeightIn",

@@ -21,13 +21,9 @@ export async function checkTargets(flags: Flags): Promise<void> {
 export async function deliver(answer: Deliverable, flags: Flags, io: Io): Promise<void> {
   const { jsonText } = await import("../report/json.js");
   const output = flags.json === true ? jsonText(answer.json()) : answer.text();
-  for (const target of csvTargets(flags)) await writeWhole(target, await csvText(answer.rows()));
+  for (const target of csvTargets(flags)) {
+    const { csvText } = await import("./csv-file.js");
+    await writeWhole(target, await csvText(answer.rows()));
+  }
   io.stdout(output);
-}
-
-async function csvText(rows: readonly CsvRecord[]): Promise<string> {
-  const [{ writeToString }, { columnsOf, harmless }] = await Promise.all([import("fast-csv"), import("../report/csv.js")]);
-  const columns = columnsOf(rows);
-  const cells = rows.map((row) => columns.map((column) => harmless(row[column] ?? null)));
-  return writeToString([columns, ...cells], { includeEndRowDelimiter: true });
 }

@@ -1,5 +1,6 @@
 import type { BridgeValues } from "../bridge/bridge.js";
 import { KEYS } from "../bridge/fields.js";
+import { DECK_BOUND } from "../bridge/resolve.js";
 import { readShipped, requireWritable, writeWhole } from "./files.js";
 import { gather } from "./gather.js";
 import { EXIT, type ExitCode, type Io } from "./io.js";
@@ -10,12 +11,7 @@ const EXAMPLE: Readonly<Record<string, string>> = { title: "Example: put in your
 
 /** `leanspan init FILE`: a starting bridge file with every key. */
 export async function runInit(path: string, flags: Flags, io: Io): Promise<ExitCode> {
-  const filled: Flags = {
-    ...flags,
-    span: flags.span ?? [EXAMPLE.span],
-    width: flags.width ?? [EXAMPLE.width],
-    set: [...(flags.set ?? []), ...((flags.set ?? []).some((one) => one.startsWith("title=")) ? [] : [`title=${EXAMPLE.title}`])],
-  };
+  const filled = flags.bridge === undefined ? withExamples(flags) : flags;
   const { bridge } = gather(filled, { bridge: "layout", shapes: false }).question;
   const target = { path, flag: "FILE" };
   await requireWritable([target], { force: flags.force === true });
@@ -28,6 +24,17 @@ export async function runInit(path: string, flags: Flags, io: Io): Promise<ExitC
   return EXIT.found;
 }
 
+/** Fills in what no practice gives: title, span and width. */
+function withExamples(flags: Flags): Flags {
+  const titled = (flags.set ?? []).some((setting) => setting.startsWith("title="));
+  return {
+    ...flags,
+    span: flags.span ?? [EXAMPLE.span],
+    width: flags.width ?? [EXAMPLE.width],
+    set: [...(flags.set ?? []), ...(titled ? [] : [`title=${EXAMPLE.title}`])],
+  };
+}
+
 /** Every key in the order of the fields: what was asked for, else the practice's own value, so that null still means "by rule". */
 function startingFile(bridge: BridgeValues, sources: Readonly<Record<string, string>>): Record<string, unknown> {
   const practice = JSON.parse(readShipped("practice.json")) as Record<string, unknown>;
@@ -36,7 +43,8 @@ function startingFile(bridge: BridgeValues, sources: Readonly<Record<string, str
     const [group, name] = key.split(".") as [string, string | undefined];
     const pick = (from: Record<string, unknown>): unknown =>
       name === undefined ? from[group] : (from[group] as Record<string, unknown> | undefined)?.[name];
-    const value = (sources[key] === "practice" ? pick(practice) : pick(bridge as unknown as Record<string, unknown>)) ?? null;
+    const byPractice = sources[key] === "practice" && (bridge.deck.kind === "concrete" || !DECK_BOUND.includes(key));
+    const value = (byPractice ? pick(practice) : pick(bridge as unknown as Record<string, unknown>)) ?? null;
     if (name === undefined) file[group] = value;
     else file[group] = { ...(file[group] as object | undefined), [name]: value };
   }

@@ -50,7 +50,7 @@ function build(io: Io, done: (code: ExitCode) => void): Command {
       addStringerFlags(
         add("lightest", "the lightest options that pass every check", [
           "lightest --span 60 --width 33",
-          `lightest --span 62'-6" --width 30 --count 4 --fy 36 --top 3`,
+          `lightest --span "62'-6\\"" --width 30 --count 4 --fy 36 --top 3`,
         ]),
       ),
     ),

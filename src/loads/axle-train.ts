@@ -123,7 +123,7 @@ function greatestWithAxleAt(train: AxleTrain, x: number, influence: (a: number) 
     const places = axlePlacesFt(driven);
     for (const at of places) {
       let sum = 0;
-      for (let axle = 0; axle < places.length; axle++) sum += driven.axlesKip[axle] * influence(x + places[axle] - at);
+      for (let axle = 0; axle < places.length; axle++) sum += driven.axlesKip[axle] * influence(x + (places[axle] - at));
       best = Math.max(best, sum);
     }
   }

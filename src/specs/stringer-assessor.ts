@@ -79,7 +79,7 @@ export abstract class StringerAssessor implements Assessor {
 
   constructor(bridge: Bridge, layout: Layout) {
     this.layout = layout;
-    this.positions = layout.count === null ? ["interior"] : ["interior", "exterior"];
+    this.positions = positionsOf(layout.count);
     const uses = {
       "live-load-deflection": { use: bridge.deflection.use, enforced: "demand" },
       depth: { use: bridge.advisories.depth, enforced: "limit" },
@@ -169,4 +169,10 @@ export abstract class StringerAssessor implements Assessor {
     this.governingSlot = failing >= 0 ? failing : worst;
     this.governingRatio = failing >= 0 ? failingRatio : worstRatio;
   }
+}
+
+/** Two stringers are both exterior; of an unknown number one interior stringer is asked for. */
+function positionsOf(count: number | null): readonly Position[] {
+  if (count === null) return ["interior"];
+  return count === 2 ? ["exterior"] : ["interior", "exterior"];
 }

@@ -59,8 +59,12 @@ function advisoryWords({ id, demand, capacity, unit, article }: Check): string {
       return `${article}: ${required} against ${provided}, as explicitly given`;
     case "distribution-sum":
       return `the factors of all stringers add up to ${provided}, the lanes bring ${required}`;
-    default:
+    case "depth":
+    case "handling":
+    case "deck-thickness":
       return `${provided} where ${required} is advised (${article})`;
+    default:
+      return `${required} against ${provided} (${article})`;
   }
 }
 

@@ -78,8 +78,8 @@ function remarks(best: Assessment): string[] {
   lines.push(
     "",
     supports.length === 0
-      ? "Bearing stiffeners: none needed (factored shear within 0.75 of the web's, 10.33.2)."
-      : `Bearing stiffeners: needed at the ${supports.map(({ position }) => position).join(" and ")} stringers (10.33.2).`,
+      ? `Bearing stiffeners: none needed (${best.stringers[0].support.article}).`
+      : `Bearing stiffeners: needed at the ${supports.map(({ position }) => position).join(" and ")} stringers (${supports[0].support.article}).`,
   );
   return lines;
 }

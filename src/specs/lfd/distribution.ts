@@ -1,5 +1,6 @@
 import type { Bridge, DeckKind } from "../../bridge/bridge.js";
-import { type Formula, formula, type Recorder } from "../../formula.js";
+import { formula, type Recorder } from "../../formula.js";
+import { type LeverArrangement, leverExteriorFormula, leverInteriorFormula, leverRuleExterior, leverRuleInterior } from "../lever-rule.js";
 
 /** A row of the table of wheel lines per stringer: S over a divisor, up to a spacing beyond which the lever rule serves. */
 export interface DistributionRow {
@@ -46,91 +47,12 @@ export function laneReduction(lanes: number): number {
   return lanes <= 2 ? 1 : lanes === 3 ? 0.9 : 0.75;
 }
 
-/** Distance between the wheels of a truck, and between the wheels of trucks side by side, ft. Source: AASHTO Standard Specifications, 17th ed., Fig. 3.7.7A, Art. 3.7. */
-const WHEEL_GAUGE_FT = 6;
-const BETWEEN_TRUCKS_FT = 4;
-/** Outer wheel from the curb, ft. */
-const WHEEL_FROM_CURB_FT = 2;
-
-/** Places of the wheels of trucks side by side from the first, ft. */
-function wheelsFt(trucks: number): number[] {
-  return Array.from({ length: trucks }, (_, truck) => truck * (WHEEL_GAUGE_FT + BETWEEN_TRUCKS_FT)).flatMap((at) => [
-    at,
-    at + WHEEL_GAUGE_FT,
-  ]);
-}
-
-/** Wheel lines that reach one stringer by the lever rule, and where the wheels stand. */
-interface LeverArrangement {
-  readonly factor: number;
-  readonly reduction: number;
-  readonly trucks: number;
-  /** Distance of each wheel that counts: from the stringer (interior) or from the curb (exterior), ft. */
-  readonly distancesFt: readonly number[];
-}
-
-/**
- * Lever rule for an interior stringer, wheel lines: the deck simply supported between stringers, curbs ignored (conservative).
- *
- * The greatest over 1 to `mostTrucks` trucks side by side, each number with its lane reduction, of the sum of a triangular influence
- * line over the adjacent bays; the train of wheels is tried with each wheel at each break of that line, where the greatest must lie.
- *
- * @param spacingFt S, ft; > 0
- * @param mostTrucks trucks side by side at most, 1 or more
- * Source: AASHTO Standard Specifications, 17th ed., Table 3.23.1 note f, Art. 3.23.1.2, 3.12.1; statics.
- */
-export function leverInterior(spacingFt: number, mostTrucks: number): LeverArrangement {
-  const S = spacingFt;
-  let best = { factor: 0, reduction: 1, trucks: 0, shift: 0 };
-  for (let trucks = 1; trucks <= mostTrucks; trucks++) {
-    const wheels = wheelsFt(trucks);
-    const reduction = laneReduction(trucks);
-    for (const wheel of wheels) {
-      for (let side = -1; side <= 1; side++) {
-        const shift = side * S - wheel;
-        const factor = reduction * triangleSum(wheels, shift, S);
-        if (factor > best.factor) best = { factor, reduction, trucks, shift };
-      }
-    }
-  }
-  const distancesFt = wheelsFt(best.trucks)
-    .map((wheel) => Math.abs(wheel + best.shift))
-    .filter((distance) => distance < S);
-  return { factor: best.factor, reduction: best.reduction, trucks: best.trucks, distancesFt };
-}
-
-/** Sum over the wheels of a triangle of height 1 over the stringer and 0 at its neighbours. */
-function triangleSum(wheels: readonly number[], shift: number, S: number): number {
-  let sum = 0;
-  for (const wheel of wheels) {
-    const distance = Math.abs(wheel + shift);
-    if (distance < S) sum += (S - distance) / S;
-  }
-  return sum;
-}
-
-/**
- * Lever rule for the exterior stringer, wheel lines: a straight line from 0 at the first interior stringer through 1 at the exterior
- * one and on over the overhang; trucks crowd to the curb.
- *
- * @param spacingFt S, ft; > 0
- * @param curbInsideFt de, web of the exterior stringer to the curb face, ft; positive when the web stands inside the curb
- * @param mostTrucks trucks side by side at most, 1 or more
- * Source: AASHTO Standard Specifications, 17th ed., Art. 3.23.2.3.1.2, 3.12.1; statics.
- */
-export function leverExterior(spacingFt: number, curbInsideFt: number, mostTrucks: number): LeverArrangement {
-  let best: LeverArrangement = { factor: 0, reduction: 1, trucks: 1, distancesFt: [] };
-  for (let trucks = 1; trucks <= mostTrucks; trucks++) {
-    const reduction = laneReduction(trucks);
-    const reach = spacingFt + curbInsideFt;
-    const distancesFt = wheelsFt(trucks)
-      .map((wheel) => WHEEL_FROM_CURB_FT + wheel)
-      .filter((distance) => distance < reach);
-    const factor = reduction * distancesFt.reduce((sum, distance) => sum + (reach - distance) / spacingFt, 0);
-    if (factor > best.factor) best = { factor, reduction, trucks, distancesFt };
-  }
-  return best;
-}
+/** The lever rule of an interior stringer with the reductions of 3.12, wheel lines. Source: AASHTO Standard Specifications, 17th ed., Table 3.23.1 note f, Art. 3.12.1. */
+export const leverInterior = (spacingFt: number, mostTrucks: number): LeverArrangement =>
+  leverRuleInterior(spacingFt, mostTrucks, laneReduction);
+/** The same of the exterior stringer. Source: AASHTO Standard Specifications, 17th ed., Art. 3.23.2.3.1.2, 3.12.1. */
+export const leverExterior = (spacingFt: number, curbInsideFt: number, mostTrucks: number): LeverArrangement =>
+  leverRuleExterior(spacingFt, curbInsideFt, mostTrucks, laneReduction);
 
 /** S over the table's divisor. Source: AASHTO Standard Specifications, 17th ed., Table 3.23.1. */
 export const spacingOverDivisor = formula("g", "S / k", "wheel lines", "Table 3.23.1", ["S", "k"], (S: number, k: number) => S / k);
@@ -192,7 +114,13 @@ export function interiorFactors(bridge: Bridge, place: DistributionPlace, record
   const { spacingFt: S, lanes, mostTrucks } = place;
   const lever = (trucks: number, symbol: string): Factor => {
     const arrangement = leverInterior(S, trucks);
-    recorder?.step(leverInteriorFormula(symbol, arrangement), arrangement.factor, arrangement.reduction, S, ...arrangement.distancesFt);
+    recorder?.step(
+      leverInteriorFormula(symbol, { article: "3.23.1.2", per: "wheel line" }, arrangement),
+      arrangement.factor,
+      arrangement.reduction,
+      S,
+      ...arrangement.distancesFt,
+    );
     return { factor: arrangement.factor, rule: "lever rule" };
   };
   const column = ({ divisor, toFt }: DistributionRow["oneLane"], trucks: number, symbol: string): Factor => {
@@ -223,7 +151,14 @@ export function exteriorFactors(bridge: Bridge, place: DistributionPlace, record
   if (de === null || count === null) throw new RangeError("an exterior stringer needs a width");
   const lever = (trucks: number, symbol: string): Factor => {
     const arrangement = leverExterior(S, de, trucks);
-    recorder?.step(leverExteriorFormula(symbol, arrangement), arrangement.factor, arrangement.reduction, S, de, ...arrangement.distancesFt);
+    recorder?.step(
+      leverExteriorFormula(symbol, { article: "3.23.2.3.1.2", per: "wheel line" }, arrangement),
+      arrangement.factor,
+      arrangement.reduction,
+      S,
+      de,
+      ...arrangement.distancesFt,
+    );
     return { factor: arrangement.factor, rule: "lever rule" };
   };
   const all = lever(mostTrucks, "glever");
@@ -231,6 +166,8 @@ export function exteriorFactors(bridge: Bridge, place: DistributionPlace, record
   const floor = exteriorFloor(bridge, S, count, recorder);
   const moment = floor !== null && floor > all.factor ? { factor: floor, rule: "floor of 3.23.2.3.1.5" } : all;
   recorder?.value("g", moment.factor, "wheel lines", moment.rule);
+  recorder?.value("gv", all.factor, "wheel lines", "lever rule, axle over the support");
+  recorder?.value("gv1", one.factor, "wheel lines", "lever rule, one truck");
   return { moment, oneLaneMoment: one, endShear: all, oneLaneEndShear: one };
 }
 
@@ -247,31 +184,4 @@ function givenFactors(bridge: Bridge): StringerFactors | null {
   if (factor === null) return null;
   const given = { factor, rule: "given" };
   return { moment: given, oneLaneMoment: given, endShear: given, oneLaneEndShear: given };
-}
-
-function leverInteriorFormula(symbol: string, { distancesFt }: LeverArrangement): Formula<number[]> {
-  const names = distancesFt.map((_, wheel) => `d${wheel + 1}`);
-  const sum = names.map((name) => `(S - ${name}) / S`).join(" + ");
-  return formula(
-    symbol,
-    `m * (${sum})`,
-    "wheel lines",
-    "3.23.1.2",
-    ["m", "S", ...names],
-    (m: number, S: number, ...distances: number[]) => m * distances.reduce((total, distance) => total + (S - distance) / S, 0),
-  );
-}
-
-function leverExteriorFormula(symbol: string, { distancesFt }: LeverArrangement): Formula<number[]> {
-  const names = distancesFt.map((_, wheel) => `p${wheel + 1}`);
-  const sum = names.length === 0 ? "0" : names.map((name) => `(S + de - ${name}) / S`).join(" + ");
-  return formula(
-    symbol,
-    `m * (${sum})`,
-    "wheel lines",
-    "3.23.2.3.1.2",
-    ["m", "S", "de", ...names],
-    (m: number, S: number, de: number, ...distances: number[]) =>
-      m * distances.reduce((total, distance) => total + (S + de - distance) / S, 0),
-  );
 }

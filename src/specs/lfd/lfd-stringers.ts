@@ -2,9 +2,10 @@ import { nextLaneStepFt } from "../../bridge/lanes.js";
 import type { Layout } from "../../bridge/layouts.js";
 import type { Steel } from "../../bridge/yield-stress.js";
 import type { Shape } from "../../catalogue/shape.js";
+import { renamed } from "../../formula.js";
 import { stage1Klf } from "../../loads/dead-load.js";
 import { IN_PER_FT, STEEL_MODULUS_KSI } from "../../units.js";
-import type { AssessmentRecorder, Design, Effects } from "../contract.js";
+import type { AssessmentRecorder, Design, Effects, Position } from "../contract.js";
 import { recordGiven, recordLaneEffects } from "../record-given.js";
 import { StringerAssessor } from "../stringer-assessor.js";
 import { greatestOverhang, leastDeckThickness, leastFlangeWidth } from "./advisories.js";
@@ -131,9 +132,17 @@ export abstract class LfdStringers extends StringerAssessor {
     const MuIA = factors.factoredMomentIA.of(out.MD, ML1);
     const VuIA = factors.factoredShearIA.of(out.VD, VL1);
     if (recorder !== null) {
-      recorder.step({ ...factors.liveMoment, symbol: "ML1" }, ML1, lane.momentKipFt, share.oneLaneMoment.factor, I);
+      recorder.step(renamed(factors.liveMoment, "ML1", { g: "g1" }), ML1, lane.momentKipFt, share.oneLaneMoment.factor, I);
       const { overSupportKip: P0, othersKip: Vr } = oneLane;
-      recorder.step({ ...factors.liveShear, symbol: "VL1" }, VL1, P0, share.oneLaneEndShear.factor, Vr, share.oneLaneMoment.factor, I);
+      recorder.step(
+        renamed(factors.liveShear, "VL1", { g: "g1", gv: "gv1", P0: "P01", Vr: "Vr1" }),
+        VL1,
+        P0,
+        share.oneLaneEndShear.factor,
+        Vr,
+        share.oneLaneMoment.factor,
+        I,
+      );
       recorder.step(factors.factoredMomentIA, MuIA, out.MD, ML1);
       recorder.step(factors.factoredShearIA, VuIA, out.VD, VL1);
     }
@@ -214,8 +223,8 @@ export abstract class LfdStringers extends StringerAssessor {
     const Mf1 = stringer.oneLaneFatigueMomentKipFt;
     const oneLaneRange = fatigueRange.of(Mf1, modulusIn3);
     if (recorder !== null) {
-      recorder.step({ ...fatigueMoment, symbol: "Mf1" }, Mf1, MT, stringer.factors.oneLaneMoment.factor, fatigueImpact);
-      recorder.step({ ...fatigueRange, symbol: "fsr1" }, oneLaneRange, Mf1, modulusIn3);
+      recorder.step(renamed(fatigueMoment, "Mf1", { g: "g1" }), Mf1, MT, stringer.factors.oneLaneMoment.factor, fatigueImpact);
+      recorder.step(renamed(fatigueRange, "fsr1", { Mf: "Mf1" }), oneLaneRange, Mf1, modulusIn3);
       recorder.value("Fsr1", oneLaneAllowedKsi, "ksi", "one lane loaded, over 2,000,000 cycles");
     }
     const oneLaneWorse = oneLaneRange / oneLaneAllowedKsi > range / allowedKsi;
@@ -284,8 +293,8 @@ export abstract class LfdStringers extends StringerAssessor {
     if (this.layout.count !== null) {
       const { lanes } = bridge.liveLoad;
       const needed = 2 * lanes * laneReduction(lanes);
-      const [interior, exterior] = this.stringers;
-      const sum = (this.layout.count - 2) * interior.factors.moment.factor + 2 * exterior.factors.moment.factor;
+      const factorOf = (position: Position): number => this.stringers.find((one) => one.position === position)?.factors.moment.factor ?? 0;
+      const sum = (this.layout.count - 2) * factorOf("interior") + 2 * factorOf("exterior");
       this.check(index, "distribution-sum", needed, sum, "wheel lines", "statics", recorder);
     }
   }

@@ -56,6 +56,7 @@ export type Topic =
   | "flexure"
   | "shear"
   | "overload"
+  | "service-ii"
   | "deflection"
   | "fatigue"
   | "deck-pour"

@@ -110,8 +110,14 @@ class Recording implements AssessmentRecorder {
   note(code: string, ...args: readonly (number | string)[]): void {
     this.#draft.notes.push({ code, args });
   }
-  support(article: string, shearKip: number, withoutStiffenersKip: number): void {
-    this.#draft.support = { article, shearKip, withoutStiffenersKip, stiffenersNeeded: !(shearKip <= withoutStiffenersKip) };
+  support(article: string, shearKip: number, withoutStiffenersKip: number, bearingLengthNeededIn: number): void {
+    this.#draft.support = {
+      article,
+      shearKip,
+      withoutStiffenersKip,
+      bearingLengthNeededIn,
+      stiffenersNeeded: !(shearKip <= withoutStiffenersKip),
+    };
   }
   studs(article: string, forceKip: number, strengthKip: number, perHalfSpan: number, perRow: number): void {
     const whole = Math.ceil(perHalfSpan / perRow - 1e-9) * perRow;

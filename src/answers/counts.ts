@@ -1,6 +1,6 @@
 import { nearestMiss, rank } from "../ranking/rank.js";
 import { type Assessment, assessInFull } from "./assessment.js";
-import { type Examined, examined, type Prepared } from "./question.js";
+import { type Examined, examined, type Prepared, refuseTwoStringers } from "./question.js";
 
 /** The best of one count, or what came nearest. */
 export interface CountRow {
@@ -24,6 +24,7 @@ const NEARLY_AS_LIGHT = 1.05;
 
 /** Compares the counts that fit across the deck: the lightest passing shape and layout of each. */
 export function counts(prepared: Prepared): CountsAnswer {
+  refuseTwoStringers(prepared);
   const { bridge, space } = prepared;
   const fitting = [...new Set(space.assessors.map(({ layout }) => layout.count))].filter((count) => count !== null).sort((a, b) => a - b);
   const rows = fitting.map((count): CountRow => {

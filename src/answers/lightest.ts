@@ -2,7 +2,7 @@ import type { ShapeFigures } from "../catalogue/shape.js";
 import { nearestMiss, type Option, rank } from "../ranking/rank.js";
 import { type Assessment, assessInFull } from "./assessment.js";
 import { type DepthRow, lightestByDepth } from "./by-depth.js";
-import { type Examined, examined, type Prepared } from "./question.js";
+import { type Examined, examined, type Prepared, refuseTwoStringers } from "./question.js";
 import { type RestsOn, restsOn } from "./rests-on.js";
 import { type WhyNotLighter, whyNotLighter } from "./why-not-lighter.js";
 
@@ -34,6 +34,7 @@ export interface LightestAnswer {
  * @param top options wanted, 1 or more
  */
 export function lightest(prepared: Prepared, top: number): LightestAnswer {
+  refuseTwoStringers(prepared);
   const { bridge, space } = prepared;
   const options = rank(space, top);
   const [best] = options;

@@ -110,6 +110,22 @@ function refuseImpossible(bridge: Bridge, { layouts }: Layouts, steels: readonly
   }
 }
 
+/**
+ * Refuses to choose among two-stringer bridges where the specification only lets them be checked.
+ *
+ * @throws {InputError} for lrfd and a count of two
+ */
+export function refuseTwoStringers({ bridge, layouts }: Prepared): void {
+  if (bridge.specification !== "lrfd" || !layouts.layouts.some(({ count }) => count === 2)) return;
+  throw new InputError([
+    {
+      field: "stringers.count",
+      problem: "two stringers are a nonredundant load path, which lrfd here checks but does not choose",
+      allowed: "three stringers or more, or the command check",
+    },
+  ]);
+}
+
 /** Counts layouts, shapes and candidates of a prepared question. */
 export function examined({ space }: Prepared): Examined {
   const [layouts, shapes] = [space.assessors.length, space.steels.length];

@@ -11,8 +11,12 @@ export const USES = ["enforce", "report", "off"] as const;
 export type Use = (typeof USES)[number];
 export const TOP_FLANGES = ["held", "diaphragms"] as const;
 export type TopFlange = (typeof TOP_FLANGES)[number];
-export const FATIGUE_DETAILS = ["A", "B", "B'", "C", "C-stiffener", "D", "E"] as const;
-export type FatigueDetail = (typeof FATIGUE_DETAILS)[number];
+/** Fatigue details by specification; C-stiffener is detail C with the ranges of transverse stiffener welds. */
+export const LFD_FATIGUE_DETAILS = ["A", "B", "B'", "C", "C-stiffener", "D", "E"] as const;
+export type LfdFatigueDetail = (typeof LFD_FATIGUE_DETAILS)[number];
+export const LRFD_FATIGUE_DETAILS = ["A", "B", "B'", "C", "C'", "D", "E", "E'"] as const;
+export type LrfdFatigueDetail = (typeof LRFD_FATIGUE_DETAILS)[number];
+export type FatigueDetail = LfdFatigueDetail | LrfdFatigueDetail;
 
 /** Every key of the bridge file with its value in force. Units stand in the names. */
 export interface BridgeValues {

@@ -1,5 +1,5 @@
 import * as z from "zod";
-import { DECK_KINDS, FATIGUE_DETAILS, GRADES, TOP_FLANGES, USES } from "./bridge.js";
+import { DECK_KINDS, GRADES, LFD_FATIGUE_DETAILS, LRFD_FATIGUE_DETAILS, TOP_FLANGES, USES } from "./bridge.js";
 import { readFeet, readInches } from "./lengths.js";
 
 /** One key of the bridge file: how a value is checked, and what is allowed in words. */
@@ -125,7 +125,7 @@ export const FIELDS: Readonly<Record<string, Field>> = {
   "liveLoad.vehicle": words(60, true),
   "liveLoad.lanes": number({ min: 1, max: 19, integer: true, nullable: true }),
   "liveLoad.adtt": number({ min: 0, max: 50000, unit: "trucks a day", nullable: true }),
-  "liveLoad.fatigueDetail": choice(FATIGUE_DETAILS, true),
+  "liveLoad.fatigueDetail": choice([...new Set([...LFD_FATIGUE_DETAILS, ...LRFD_FATIGUE_DETAILS])], true),
   "liveLoad.distribution": number({ min: 0.05, max: 10, unit: "wheel lines per stringer", nullable: true }),
   "deadLoad.stage1Klf": number({ min: 0, max: 20, unit: "kip/ft", nullable: true }),
   "deadLoad.stage2Klf": number({ min: 0, max: 20, unit: "kip/ft", nullable: true }),

@@ -1,7 +1,7 @@
 import { InputError, type InputIssue } from "../errors.js";
 import { didYouMean } from "../nearest.js";
 import { UNIT_WEIGHT_PCF } from "../units.js";
-import type { Bridge, BridgeValues, DeckKind, Source } from "./bridge.js";
+import { type Bridge, type BridgeValues, type DeckKind, LFD_FATIGUE_DETAILS, LRFD_FATIGUE_DETAILS, type Source } from "./bridge.js";
 import { KEYS } from "./fields.js";
 import { designLanes, mostLanes, NARROWEST_LANE_FT } from "./lanes.js";
 import type { Layer } from "./layers.js";
@@ -12,7 +12,7 @@ export interface ResolveOptions {
   /** `layout`: a width or a spacing is needed; `width`: a width is; `span`: the span is enough. */
   readonly needs: "layout" | "width" | "span";
   /** Vehicles that may be named. */
-  readonly vehicles: readonly { readonly name: string; readonly aliases: readonly string[] }[];
+  readonly vehicles: readonly { readonly name: string; readonly aliases: readonly string[]; readonly dynamicAllowance: number | null }[];
 }
 
 /** Keys whose values belong to one kind of deck and never pass to another. */
@@ -117,6 +117,7 @@ class Draft {
   readonly #layers: ReadonlyMap<string, Layer>;
   readonly #at: (key: string) => Pick<InputIssue, "file" | "field">;
   readonly #issues: InputIssue[];
+  #togetherVehicles: readonly string[] = [];
 
   constructor(merged: Merged, at: (key: string) => Pick<InputIssue, "file" | "field">, issues: InputIssue[]) {
     this.#values = merged.values;
@@ -228,6 +229,7 @@ class Draft {
   }
 
   settleVehicle(vehicles: ResolveOptions["vehicles"]): void {
+    this.#togetherVehicles = vehicles.filter(({ dynamicAllowance }) => dynamicAllowance !== null).map(({ name }) => name);
     const asked = this.#values.get("liveLoad.vehicle") as string | null | undefined;
     if (asked === null || asked === undefined) {
       this.#values.set("liveLoad.vehicle", this.#values.get("specification") === "lrfd" ? "HL-93" : "HS20-44");
@@ -247,13 +249,34 @@ class Draft {
     }
     const composite = asked ?? kind === "concrete";
     this.#values.set("deck.composite", composite);
-    if (this.#values.get("specification") === "lrfd") {
-      this.#fault("specification", "the lrfd checks are not built yet", "lfd");
+    if (needs !== "span") this.#settleVehicleOfSpecification();
+    this.#settleFatigueDetail();
+  }
+
+  /** HL-93 is lrfd's, whole trucks and lanes without dynamic allowance are lfd's; lrfd takes a user's vehicle that says how it combines. */
+  #settleVehicleOfSpecification(): void {
+    const vehicle = this.#values.get("liveLoad.vehicle") as string;
+    const together = this.#togetherVehicles.includes(vehicle);
+    if (this.#values.get("specification") === "lrfd" && !together) {
+      this.#fault("liveLoad.vehicle", `${vehicle} is not a live load of lrfd`, this.#togetherVehicles.join(", "));
     }
-    if (this.#values.get("liveLoad.vehicle") === "HL-93" && needs !== "span") {
-      this.#fault("liveLoad.vehicle", "HL-93 belongs to lrfd", "a truck or lane loading of the Standard Specifications");
+    if (this.#values.get("specification") !== "lrfd" && together) {
+      this.#fault(
+        "liveLoad.vehicle",
+        `${vehicle} belongs to lrfd`,
+        "a truck or lane loading of the Standard Specifications, or --spec lrfd",
+      );
     }
-    if ((this.#values.get("liveLoad.fatigueDetail") ?? null) === null) this.#values.set("liveLoad.fatigueDetail", "C-stiffener");
+  }
+
+  #settleFatigueDetail(): void {
+    const lrfd = this.#values.get("specification") === "lrfd";
+    const detail = (this.#values.get("liveLoad.fatigueDetail") ?? null) as string | null;
+    const known: readonly string[] = lrfd ? LRFD_FATIGUE_DETAILS : LFD_FATIGUE_DETAILS;
+    if (detail === null) this.#values.set("liveLoad.fatigueDetail", lrfd ? "C'" : "C-stiffener");
+    else if (!known.includes(detail)) {
+      this.#fault("liveLoad.fatigueDetail", `detail ${detail} is not one of ${lrfd ? "lrfd" : "lfd"}`, known.join(", "));
+    }
   }
 
   settleBracing(): void {

@@ -7,6 +7,8 @@ export interface AxleTrain {
   readonly axlesKip: readonly number[];
   /** One fewer than axles. */
   readonly spacingsFt: readonly number[];
+  /** False for a train that plays no part in live-load deflection, such as the design tandem. */
+  readonly deflection?: boolean;
 }
 
 /** Weight of a whole train, kip. */
@@ -16,7 +18,7 @@ export function grossWeightKip(train: AxleTrain): number {
 
 /** The same train driving the other way. */
 export function reversed(train: AxleTrain): AxleTrain {
-  return { name: train.name, axlesKip: train.axlesKip.toReversed(), spacingsFt: train.spacingsFt.toReversed() };
+  return { ...train, axlesKip: train.axlesKip.toReversed(), spacingsFt: train.spacingsFt.toReversed() };
 }
 
 /** The same train with every axle multiplied. */

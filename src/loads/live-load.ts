@@ -126,12 +126,12 @@ function sectionEffectsByName(vehicle: Vehicle, L: number, x: number): NamedEffe
   };
   const added = together ? ofUniform : { moment: 0, shear: 0, deflection: 0 };
   const candidates = factoredTrains(vehicle).map((train) => {
-    const deflection = greatestDeflectionAt(train, L, x);
+    const deflection = train.deflection === false ? 0 : greatestDeflectionAt(train, L, x);
     return {
       name: train.name,
       moment: greatestMomentAt(train, L, x) + added.moment,
       shear: greatestShearAt(train, L, x) + added.shear,
-      deflection: together ? Math.max(deflection, 0.25 * deflection + added.deflection) : deflection,
+      deflection: together && train.deflection !== false ? Math.max(deflection, 0.25 * deflection + added.deflection) : deflection,
     };
   });
   if (lane !== null && !together) {

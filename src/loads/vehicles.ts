@@ -27,7 +27,7 @@ const H20_GROSS_KIP = 40;
 
 const axlesKip = z.array(z.number().positive().max(300)).min(1).max(60);
 const spacingsFt = z.array(z.number().positive().max(200)).max(59);
-const train = z.strictObject({ name: z.string().min(1).max(40), axlesKip, spacingsFt });
+const train = z.strictObject({ name: z.string().min(1).max(40), axlesKip, spacingsFt, deflection: z.boolean().default(true) });
 const common = {
   name: z.string().min(1).max(60),
   aliases: z.array(z.string().min(1).max(60)).optional(),

@@ -7,7 +7,8 @@ const MILITARY_GOVERNS_BELOW_FT = 40;
 
 /** Every assumption an answer rests on, a sentence each, with the values in force. */
 export function assumptionsOf(bridge: Bridge): string[] {
-  return [...deckAssumptions(bridge), ...loadAssumptions(bridge), ...checkAssumptions(bridge)];
+  const checks = bridge.specification === "lrfd" ? lrfdAssumptions(bridge) : lfdAssumptions(bridge);
+  return [...deckAssumptions(bridge), ...loadAssumptions(bridge), ...checks, ...commonAssumptions(bridge)];
 }
 
 /** The assumptions under a live-load answer, which needs no stringers. */
@@ -27,7 +28,7 @@ function deckAssumptions(bridge: Bridge): string[] {
   const given = bridge.deadLoad;
   const list = [
     `Straight, unskewed simple span of ${feetText(bridge.spanFt)} ft, equal shapes at equal spacing; pieces ${feetText(bridge.spanFt + 2 * bridge.pieceOverlapFt)} ft long.`,
-    deck.composite ? "Composite with the deck." : "Noncomposite: the deck adds weight and no strength.",
+    deck.composite ? "Composite with the deck under all load but the first stage." : "Noncomposite: the deck adds weight and no strength.",
   ];
   if (given.stage1Klf === null) list.push(`Deck: ${thickness}${deck.kind}${haunch}; weight ${deckWeightText(bridge)}.`);
   else
@@ -77,8 +78,8 @@ function loadAssumptions(bridge: Bridge): string[] {
       : `Live load ${vehicle}; ${lanes} lane${lanes === 1 ? "" : "s"} ${laneSource} on ${feetText(bridge.roadwayFt)} ft of roadway.`,
     ...military(bridge),
     distribution === null
-      ? "Live load to each stringer by Table 3.23.1 in wheel lines, the lever rule beyond its range and for exterior stringers; trucks 4 ft apart regardless of lane lines, curbs ignored for interior stringers (conservative)."
-      : `Distribution given: ${shown(distribution)} wheel lines per stringer for moment and shear, in place of the specification's.`,
+      ? distributionText(bridge)
+      : `Distribution given: ${shown(distribution)} ${bridge.specification === "lrfd" ? "lanes" : "wheel lines"} per stringer for moment and shear, in place of the specification's.`,
     "Impact applies under every kind of deck, for the stringers are steel.",
     "Greatest dead and live effects are added, though they stand at slightly different sections (slightly conservative).",
     "All stringers are equal, so an exterior one is never weaker than an interior one.",
@@ -91,13 +92,68 @@ function military(bridge: Bridge): string[] {
   return ["The Alternate Military loading of Interstate bridges is left out; it can govern under 40 ft (vehicle HS20+military)."];
 }
 
-function checkAssumptions(bridge: Bridge): string[] {
+function distributionText({ specification, deck }: Bridge): string {
+  const trucks = "trucks 4 ft apart regardless of lane lines, curbs ignored for interior stringers (conservative)";
+  if (specification === "lfd") {
+    return `Live load to each stringer by Table 3.23.1 in wheel lines, the lever rule beyond its range and for exterior stringers; ${trucks}.`;
+  }
+  const rule =
+    deck.kind === "concrete"
+      ? "the formulas of 4.6.2.2, the lever rule beyond their range, the rigid section as a minimum of exterior stringers"
+      : "Table 4.6.2.2.2a-1, the lever rule beyond it and for exterior stringers";
+  return `Live load to each stringer in lanes by ${rule}; ${trucks}.`;
+}
+
+function lfdAssumptions(bridge: Bridge): string[] {
   const { adtt, fatigueDetail } = bridge.liveLoad;
   const traffic = adtt === null ? "truck traffic not given, taken as 2,500 a day or more" : `${shown(adtt)} trucks a day`;
   const list = [
     `Fatigue: HS20 truck, detail ${fatigueDetail === "C-stiffener" ? "C of a stiffener weld" : fatigueDetail}, redundant load paths from three stringers up, ${traffic}; checked at the extreme tension fibre; cycles of the lane loading are not checked.`,
-    "Noncompact shapes take the braced noncompact or partially braced capacity; the straight line that 10.48.3 allows is not used (conservative).",
   ];
+  if (bridge.deck.composite) list.push(...compositeAssumptions(bridge));
+  else {
+    list.push(
+      "Noncompact shapes take the braced noncompact or partially braced capacity; the straight line that 10.48.3 allows is not used (conservative).",
+    );
+  }
+  if (bridge.deck.kind === "concrete") {
+    list.push(
+      `Deck pour: 1.3 times wet deck, steel and ${shown(bridge.pour.constructionPsf)} lb/ft2 on the bare shape (the factor is our choice); twisting of the fascia stringer by overhang brackets is not computed.`,
+    );
+  }
+  return list;
+}
+
+function lrfdAssumptions(bridge: Bridge): string[] {
+  const { adtt, fatigueDetail } = bridge.liveLoad;
+  const traffic = adtt === null ? "truck traffic in one lane not given, infinite life checked" : `${shown(adtt)} trucks a day in one lane`;
+  const list = [
+    "Load modifier and resistance factors of flexure and shear 1.0; Strength I, Service II, Fatigue I or II.",
+    `Fatigue: truck with rear axles 30 ft apart, one lane, detail ${fatigueDetail} at the bottom flange, one cycle a truck, ${traffic}.`,
+  ];
+  if (bridge.deck.composite) list.push(...compositeAssumptions(bridge));
+  if (bridge.stringers.count === 2) list.push("Two stringers are a nonredundant load path; the specification asks for four.");
+  if (bridge.deck.kind === "concrete") {
+    const brackets =
+      bridge.pour.lateralBendingKsi === 0
+        ? "overhang brackets not covered"
+        : `${shown(bridge.pour.lateralBendingKsi)} ksi of factored lateral bending as given`;
+    list.push(
+      `Deck pour: the worse of 1.25 dead + 1.5 construction and 1.4 of both, ${shown(bridge.pour.constructionPsf)} lb/ft2, on the bare shape; ${brackets}.`,
+    );
+  }
+  return list;
+}
+
+function compositeAssumptions({ deck }: Bridge): string[] {
+  const ratio = deck.modularRatio === null ? "by the specification" : `${shown(deck.modularRatio)} as given`;
+  return [
+    `Composite: unshored, slab of f'c ${shown(deck.fcKsi ?? 0)} ksi less ${shown(deck.sacrificialIn)} in, haunch ${shown(deck.haunchSectionIn)} in in section properties, modular ratio ${ratio}, three times it for lasting load; the whole slab counts even if the axis lies in it (within about 1 %); reinforcement left out.`,
+  ];
+}
+
+function commonAssumptions(bridge: Bridge): string[] {
+  const list: string[] = [];
   if (bridge.deflection.use !== "off") {
     const use = bridge.deflection.use === "report" ? ", reported only" : "";
     const share =
@@ -105,11 +161,6 @@ function checkAssumptions(bridge: Bridge): string[] {
         ? "by the stringer's moment factor"
         : "all lanes loaded, shared equally by all stringers (presumes diaphragms)";
     list.push(`Live-load deflection at most span/${shown(bridge.deflection.spanOver)}${use}; ${share}.`);
-  }
-  if (bridge.deck.kind === "concrete") {
-    list.push(
-      `Deck pour: 1.3 times wet deck, steel and ${shown(bridge.pour.constructionPsf)} lb/ft2 on the bare shape (the factor is our choice); twisting of the fascia stringer by overhang brackets is not computed.`,
-    );
   }
   list.push("Not covered: deck design, skew, sidewalk load, wind, earthquake, splices, bearings, substructure.");
   return list;

@@ -25,23 +25,29 @@ export function byHandLines(
   const lanes = groupIA ? ", one lane loaded (Group IA)" : "";
   const flexure = checks.find(({ id }) => id === "flexure");
   const compact = flexure?.article === "10.48.1";
-  const strength = `1.3 x (${shown(MD)} + ${groupIA ? "2.20" : "1.67"} x ${shown(ML)})`;
+  const lrfd = effects.distributionPer === "lane";
   const need = requiredText();
   return [
     `w = ${shown(effects.deadStage1Klf)} (deck and steel) + ${shown(effects.deadStage2Klf)} (barriers) + ${shown(effects.deadWearingKlf)} (wearing) = ${shown(w)} kip/ft on the ${stringer.position} stringer`,
     `wL^2/8 = ${shown(w)} x ${L}^2 / 8 = ${shown(MD)} kip-ft dead moment`,
-    `Live: ${shown(effects.liveMomentPerLaneKipFt)} kip-ft (${bridge.liveLoad.vehicle} table, one lane) / 2 x ${shown(factor)} wheel lines x ${shown(1 + effects.impact)} impact = ${shown(ML)} kip-ft${lanes}`,
+    effects.distributionPer === "lane"
+      ? `Live: ${shown(effects.liveMomentPerLaneKipFt)} kip-ft (${bridge.liveLoad.vehicle}, one lane, dynamic allowance and lane load in it) x ${shown(factor)} lanes = ${shown(ML)} kip-ft`
+      : `Live: ${shown(effects.liveMomentPerLaneKipFt)} kip-ft (${bridge.liveLoad.vehicle} table, one lane) / 2 x ${shown(factor)} wheel lines x ${shown(1 + effects.impact)} impact = ${shown(ML)} kip-ft${lanes}`,
     need,
   ];
 
   function requiredText(): string {
     const { requiredZIn3, requiredSIn3 } = effects;
+    const strength = lrfd
+      ? `1.25 x ${shown(MD - effects.momentWearingKipFt)} + 1.50 x ${shown(effects.momentWearingKipFt)} + 1.75 x ${shown(ML)}`
+      : `1.3 x (${shown(MD)} + ${groupIA ? "2.20" : "1.67"} x ${shown(ML)})`;
     if (compact && requiredZIn3 !== null) {
       return `Z: 12 x ${strength} / ${shown(assessment.fyKsi)} = ${shown(requiredZIn3)} in3 required (flexure), ${assessment.shape} has Zx ${shown(shape.plasticModulusXIn3)} in3`;
     }
-    const moment = `flexure: Mu = ${strength} = ${shown(effects.factoredMomentKipFt)} kip-ft against ${shown(flexure?.capacity ?? 0)} kip-ft`;
+    const against = flexure?.unit === "ksi" ? "by staged stresses" : `against ${shown(flexure?.capacity ?? 0)} kip-ft`;
+    const moment = `flexure: Mu = ${strength} = ${shown(effects.factoredMomentKipFt)} kip-ft ${against}`;
     if (requiredSIn3 === null) return moment;
-    const live = groupIA ? "2.20" : "5/3";
-    return `S: 12 x (${shown(MD)} + ${live} x ${shown(ML)}) / (0.80 x ${shown(assessment.fyKsi)}) = ${shown(requiredSIn3)} in3 required (overload), ${assessment.shape} has Sx ${shown(shape.sectionModulusXIn3)} in3; ${moment}`;
+    const [live, check] = lrfd ? ["1.30", "Service II"] : [groupIA ? "2.20" : "5/3", "overload"];
+    return `S: 12 x (${shown(MD)} + ${live} x ${shown(ML)}) / (0.80 x ${shown(assessment.fyKsi)}) = ${shown(requiredSIn3)} in3 required (${check}), ${assessment.shape} has Sx ${shown(shape.sectionModulusXIn3)} in3; ${moment}`;
   }
 }

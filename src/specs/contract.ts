@@ -90,8 +90,11 @@ export interface AssessmentRecorder extends Recorder {
   effects(effects: Effects): void;
   check(check: Check): void;
   note(code: string, ...args: readonly (number | string)[]): void;
-  /** Whether bearing stiffeners are needed: factored shear and the shear up to which none are, kip. */
-  support(article: string, shearKip: number, withoutStiffenersKip: number): void;
+  /**
+   * Whether bearing stiffeners are needed: factored shear and the shear up to which none are, kip; and the bearing length at which the
+   * web takes the reaction by yielding and crippling, in.
+   */
+  support(article: string, shearKip: number, withoutStiffenersKip: number, bearingLengthIn: number): void;
   /** Studs between midspan and either end by strength: the force they carry, the strength of one, how many, and how many stand in a row. */
   studs(article: string, forceKip: number, strengthKip: number, perHalfSpan: number, perRow: number): void;
 }
@@ -122,6 +125,8 @@ export interface StringerAssessment {
     readonly article: string;
     readonly shearKip: number;
     readonly withoutStiffenersKip: number;
+    /** Bearing length at which the web takes the reaction by yielding and crippling (LRFD D6.5), in. */
+    readonly bearingLengthNeededIn: number;
     readonly stiffenersNeeded: boolean;
   };
   /** Studs by strength; null for noncomposite stringers. */

@@ -1,8 +1,17 @@
 import type { Bridge } from "../bridge/bridge.js";
+import { nextLaneStepFt } from "../bridge/lanes.js";
 import type { Layout } from "../bridge/layouts.js";
 import type { Steel } from "../bridge/yield-stress.js";
+import type { Shape } from "../catalogue/shape.js";
+import { formula } from "../formula.js";
 import { ABSENT, type AssessmentRecorder, type Assessor, type CheckId, type CheckKind, type Position } from "./contract.js";
 
+/** Roadways less than this below the next lane count are pointed out, ft. Source: common practice. */
+const LANE_STEP_MARGIN_FT = 2;
+/** Overhang beyond which the pour's brackets twist the fascia stringer noticeably. Source: common practice. */
+const greatestOverhang = formula("omax", "min(3, 1.3 * d / 12)", "ft", "common practice", ["d"], (d: number) =>
+  Math.min(3, (1.3 * d) / 12),
+);
 /** Places of the checks of one stringer, in the order in which they are shown; no specification uses all of them. */
 const SLOTS = [
   "flexure",
@@ -134,6 +143,24 @@ export abstract class StringerAssessor implements Assessor {
     const kind = this.#kinds[place];
     if (this.#screening && !(ratio <= 1) && kind !== "advisory") this.settled = true;
     recorder?.check({ id: slot === "bracing-advisory" ? "bracing" : slot, kind, article, demand, capacity, unit, ratio, ok: ratio <= 1 });
+  }
+
+  /** Advisories on the layout, the same in every specification: overhang, limits of the practice, a lane nearly gained. */
+  protected adviseLayout(index: number, bridge: Bridge, shape: Shape, recorder: AssessmentRecorder | null): void {
+    const { overhangFt, broken } = this.layout;
+    if (this.positions[index] === "exterior" && overhangFt !== null) {
+      const omax = greatestOverhang.of(shape.depthIn);
+      recorder?.step(greatestOverhang, omax, shape.depthIn);
+      this.check(index, "overhang", overhangFt, omax, "ft", "common practice", recorder);
+    }
+    for (const { key, value, limit } of broken) {
+      const [required, provided] = value > limit ? [value, limit] : [limit, value];
+      this.check(index, "layout", required, provided, key.endsWith("Ft") ? "ft" : "-", `practice ${key}`, recorder);
+    }
+    if (bridge.roadwayFt !== null && bridge.sources["liveLoad.lanes"] === "practice") {
+      const gap = nextLaneStepFt(bridge.roadwayFt) - bridge.roadwayFt;
+      this.check(index, "lane-step", LANE_STEP_MARGIN_FT, gap, "ft", bridge.specification === "lfd" ? "3.6" : "3.6.1.1.1", recorder);
+    }
   }
 
   #run(steel: Steel, recorder: AssessmentRecorder | null): void {

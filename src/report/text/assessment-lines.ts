@@ -98,14 +98,15 @@ export function checkTable({ checks }: StringerAssessment, style: Style): string
 
 const TOPIC_WORDS: Readonly<Record<Topic, string>> = {
   section: "Given",
-  "live-load": "Live load, one lane, no impact",
+  "live-load": "Live load, one lane",
   "dead-load": "Dead load that the shape does not change",
-  distribution: "Distribution to the stringer, wheel lines",
+  distribution: "Distribution to the stringer",
   effects: "Load effects",
   "composite-section": "Composite section",
   flexure: "Flexure",
   shear: "Shear",
   overload: "Overload",
+  "service-ii": "Service II",
   deflection: "Live-load deflection",
   fatigue: "Fatigue",
   "deck-pour": "Deck pour on the bare shape",

@@ -43,7 +43,7 @@ function supportLines({ support, effects, studs }: StringerAssessment): string[]
   const needed = support.stiffenersNeeded ? "needed" : "not needed";
   return [
     ...wrap(
-      `Bearing stiffeners ${needed}: factored shear ${shown(support.shearKip)} kip, none needed to ${shown(support.withoutStiffenersKip)} kip (${support.article}).`,
+      `Bearing stiffeners ${needed}: factored shear ${shown(support.shearKip)} kip, none needed to ${shown(support.withoutStiffenersKip)} kip (${support.article}). By web yielding and crippling (LRFD D6.5) a bearing ${shown(support.bearingLengthNeededIn)} in long is enough without.`,
       WIDTH,
       "",
     ),
@@ -63,7 +63,7 @@ export function studsText({ perHalfSpan, perStringer, strengthKip, forceKip, art
 
 function requiredText({ requiredZIn3, requiredSIn3, plasticMomentKipFt, effectiveWidthIn }: Effects): string {
   if (requiredZIn3 !== null && requiredSIn3 !== null) {
-    return `Required: Z ${shown(requiredZIn3)} in3 (flexure, if compact), S ${shown(requiredSIn3)} in3 (overload).`;
+    return `Required: Z ${shown(requiredZIn3)} in3 (flexure, if compact), S ${shown(requiredSIn3)} in3 (service).`;
   }
   return `Effective slab ${shown(effectiveWidthIn ?? 0)} in wide, plastic moment ${shown(plasticMomentKipFt ?? 0)} kip-ft.`;
 }
@@ -85,6 +85,12 @@ export function noteText({ code, args }: Note): string {
       }; plastic neutral axis in the ${args[1]}.`;
     case "distribution":
       return `Distribution: moment by ${args[0]}, axle over the support by ${args[1]}.`;
+    case "distribution-lanes":
+      return `Distribution, lanes: moment by ${args[0]}, shear by ${args[1]}.`;
+    case "fatigue-state":
+      return `Fatigue: ${args[0]}.`;
+    case "brackets-not-covered":
+      return "Deck pour: lateral bending by overhang brackets is not covered (pour.lateralBendingKsi 0).";
     case "outside-flexure-rules":
       return `Outside the flexure rules: bf/2tf ${shown(Number(args[0]))}, D/tw ${shown(Number(args[1]))}; no capacity is counted.`;
     default:

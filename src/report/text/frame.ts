@@ -21,7 +21,8 @@ export function firstLine(bridge: Bridge): string {
   const { deck } = bridge;
   const thickness = deck.thicknessIn === null ? "" : `${shown(deck.thicknessIn)} in `;
   const action = deck.composite ? "composite" : "noncomposite";
-  return `LFD, AASHTO Standard Specs 17th ed. (2002); ${action}; ${thickness}${deck.kind}; ${feetText(bridge.spanFt)} ft`;
+  const edition = bridge.specification === "lrfd" ? "LRFD, AASHTO 9th ed. (2020)" : "LFD, AASHTO Standard Specs 17th ed. (2002)";
+  return `${edition}; ${action}; ${thickness}${deck.kind}; ${feetText(bridge.spanFt)} ft`;
 }
 
 /** Title lines under the first: what the bridge is called, how wide it is. */

@@ -11,9 +11,5 @@ export const leastFlangeWidth = formula(
   ["L", "a"],
   (L: number, a: number) => (12 * (L + 2 * a)) / 85,
 );
-/** Overhang beyond which the pour's brackets twist the fascia stringer noticeably. Source: common practice. */
-export const greatestOverhang = formula("omax", "min(3, 1.3 * d / 12)", "ft", "common practice", ["d"], (d: number) =>
-  Math.min(3, (1.3 * d) / 12),
-);
 /** Least thickness of a concrete deck. Source: AASHTO Standard Specifications, 17th ed., Art. 8.9.2. */
 export const leastDeckThickness = formula("tmin", "12 * (S + 10) / 30", "in", "8.9.2", ["S"], (S: number) => (12 * (S + 10)) / 30);

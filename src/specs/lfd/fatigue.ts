@@ -1,4 +1,4 @@
-import type { FatigueDetail } from "../../bridge/bridge.js";
+import type { LfdFatigueDetail } from "../../bridge/bridge.js";
 import { formula } from "../../formula.js";
 
 /** Stress ranges allowed at 100,000, 500,000, 2,000,000 and over 2,000,000 cycles, ksi. */
@@ -8,7 +8,7 @@ export type AllowedRanges = readonly [number, number, number, number];
  * Allowed stress ranges of redundant load paths, ksi.
  * Source: AASHTO Standard Specifications, 17th ed., Table 10.3.1A (values from memory); C-stiffener: its note for transverse stiffener welds.
  */
-export const REDUNDANT_RANGES_KSI: Readonly<Record<FatigueDetail, AllowedRanges>> = {
+export const REDUNDANT_RANGES_KSI: Readonly<Record<LfdFatigueDetail, AllowedRanges>> = {
   A: [63, 37, 24, 24],
   B: [49, 29, 18, 16],
   "B'": [39, 23, 14.5, 12],
@@ -22,7 +22,7 @@ export const REDUNDANT_RANGES_KSI: Readonly<Record<FatigueDetail, AllowedRanges>
  * Allowed stress ranges of nonredundant load paths (two stringers), ksi.
  * Source: AASHTO Standard Specifications, 17th ed., Table 10.3.1A (values from memory).
  */
-export const NONREDUNDANT_RANGES_KSI: Readonly<Record<FatigueDetail, AllowedRanges>> = {
+export const NONREDUNDANT_RANGES_KSI: Readonly<Record<LfdFatigueDetail, AllowedRanges>> = {
   A: [50, 29, 24, 24],
   B: [39, 23, 16, 16],
   "B'": [31, 18, 11, 11],
@@ -36,7 +36,7 @@ export const NONREDUNDANT_RANGES_KSI: Readonly<Record<FatigueDetail, AllowedRang
 const REDUNDANT_FROM = 3;
 
 /** The ranges that hold for a number of stringers; an unknown number counts as redundant. */
-export function allowedRanges(detail: FatigueDetail, count: number | null): AllowedRanges {
+export function allowedRanges(detail: LfdFatigueDetail, count: number | null): AllowedRanges {
   return (count !== null && count < REDUNDANT_FROM ? NONREDUNDANT_RANGES_KSI : REDUNDANT_RANGES_KSI)[detail];
 }
 

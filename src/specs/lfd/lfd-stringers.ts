@@ -1,14 +1,16 @@
-import { nextLaneStepFt } from "../../bridge/lanes.js";
+import type { LfdFatigueDetail } from "../../bridge/bridge.js";
 import type { Layout } from "../../bridge/layouts.js";
 import type { Steel } from "../../bridge/yield-stress.js";
 import type { Shape } from "../../catalogue/shape.js";
 import { renamed } from "../../formula.js";
 import { stage1Klf } from "../../loads/dead-load.js";
 import { IN_PER_FT, STEEL_MODULUS_KSI } from "../../units.js";
+import { bearingLengthNeededIn } from "../bearing.js";
 import type { AssessmentRecorder, Design, Effects, Position } from "../contract.js";
+import * as moments from "../dead-moments.js";
 import { recordGiven, recordLaneEffects } from "../record-given.js";
 import { StringerAssessor } from "../stringer-assessor.js";
-import { greatestOverhang, leastDeckThickness, leastFlangeWidth } from "./advisories.js";
+import { leastDeckThickness, leastFlangeWidth } from "./advisories.js";
 import { allowedDeflection, sharedDeflection, stringerDeflection } from "./deflection.js";
 import { laneReduction } from "./distribution.js";
 import { allowedRanges, type FatigueCase, fatigueCase, fatigueMoment, fatigueRange } from "./fatigue.js";
@@ -25,9 +27,6 @@ import * as factors from "./load-factors.js";
 import { constructionLoad, pourMoment } from "./pour.js";
 import { shearCapacityKip, withoutBearingStiffeners } from "./shear.js";
 import { FATIGUE_VEHICLE, type LfdLayout, lfdLayout, type StringerLoads, stringerLoads } from "./stringer-loads.js";
-
-/** Roadways less than this below the next lane count are pointed out, ft. Source: common practice. */
-const LANE_STEP_MARGIN_FT = 2;
 
 /** Loads and moments of one stringer with one shape. One object is used again and again. */
 export interface LfdEffects {
@@ -78,7 +77,7 @@ export abstract class LfdStringers extends StringerAssessor {
     this.fixed = lfdLayout(design, layout);
     this.stringers = this.positions.map((position) => stringerLoads(this.fixed, position, null));
     this.diaphragmsIn = bridge.bracing.diaphragmSpacingFt * IN_PER_FT;
-    this.#fatigue = fatigueCase(bridge.liveLoad.adtt, allowedRanges(bridge.liveLoad.fatigueDetail, layout.count));
+    this.#fatigue = fatigueCase(bridge.liveLoad.adtt, allowedRanges(bridge.liveLoad.fatigueDetail as LfdFatigueDetail, layout.count));
   }
 
   /** Writes down all that stands before the shape comes in. */
@@ -106,16 +105,16 @@ export abstract class LfdStringers extends StringerAssessor {
     recorder?.topic("effects");
     out.w1 = stage1Klf(bridge, dead, shape, recorder);
     const { stage2Klf: w2, wearingKlf: ww } = dead;
-    out.M1 = factors.momentStage1.of(out.w1, L);
-    recorder?.step(factors.momentStage1, out.M1, out.w1, L);
-    out.M2 = factors.momentStage2.of(w2, L);
-    recorder?.step(factors.momentStage2, out.M2, w2, L);
-    out.Mw = factors.momentWearing.of(ww, L);
-    recorder?.step(factors.momentWearing, out.Mw, ww, L);
+    out.M1 = moments.momentStage1.of(out.w1, L);
+    recorder?.step(moments.momentStage1, out.M1, out.w1, L);
+    out.M2 = moments.momentStage2.of(w2, L);
+    recorder?.step(moments.momentStage2, out.M2, w2, L);
+    out.Mw = moments.momentWearing.of(ww, L);
+    recorder?.step(moments.momentWearing, out.Mw, ww, L);
     out.MD = factors.deadMoment.of(out.M1, out.M2, out.Mw);
     recorder?.step(factors.deadMoment, out.MD, out.M1, out.M2, out.Mw);
-    out.VD = factors.deadShear.of(out.w1, w2, ww, L);
-    recorder?.step(factors.deadShear, out.VD, out.w1, w2, ww, L);
+    out.VD = moments.deadShear.of(out.w1, w2, ww, L);
+    recorder?.step(moments.deadShear, out.VD, out.w1, w2, ww, L);
     out.ML = live.momentKipFt;
     recorder?.step(factors.liveMoment, out.ML, lane.momentKipFt, share.moment.factor, I);
     out.VL = live.shearKip;
@@ -162,7 +161,7 @@ export abstract class LfdStringers extends StringerAssessor {
     this.check(index, "shear", this.effects.Vu, Vcap, "kip", "10.48.8", recorder);
     const Vbs = withoutBearingStiffeners.of(Vcap);
     recorder?.step(withoutBearingStiffeners, Vbs, Vcap);
-    recorder?.support("10.33.2", this.effects.Vu, Vbs);
+    recorder?.support("10.33.2", this.effects.Vu, Vbs, bearingLengthNeededIn(shape, fyKsi, this.effects.Vu));
   }
 
   /**
@@ -266,25 +265,13 @@ export abstract class LfdStringers extends StringerAssessor {
   protected advise(index: number, shape: Shape, recorder: AssessmentRecorder | null): void {
     if (this.advisoriesOff) return;
     const { bridge } = this.design;
-    const { spacingFt, overhangFt } = this.layout;
+    const { spacingFt } = this.layout;
     recorder?.topic("advisories");
     this.adviseDepth(index, shape, recorder);
     const bmin = leastFlangeWidth.of(bridge.spanFt, bridge.pieceOverlapFt);
     recorder?.step(leastFlangeWidth, bmin, bridge.spanFt, bridge.pieceOverlapFt);
     this.check(index, "handling", bmin, shape.flangeWidthIn, "in", "common practice", recorder);
-    if (this.positions[index] === "exterior" && overhangFt !== null) {
-      const omax = greatestOverhang.of(shape.depthIn);
-      recorder?.step(greatestOverhang, omax, shape.depthIn);
-      this.check(index, "overhang", overhangFt, omax, "ft", "common practice", recorder);
-    }
-    for (const { key, value, limit } of this.layout.broken) {
-      const [required, provided] = value > limit ? [value, limit] : [limit, value];
-      this.check(index, "layout", required, provided, key.endsWith("Ft") ? "ft" : "-", `practice ${key}`, recorder);
-    }
-    if (bridge.roadwayFt !== null && bridge.sources["liveLoad.lanes"] === "practice") {
-      const gap = nextLaneStepFt(bridge.roadwayFt) - bridge.roadwayFt;
-      this.check(index, "lane-step", LANE_STEP_MARGIN_FT, gap, "ft", "3.6", recorder);
-    }
+    this.adviseLayout(index, bridge, shape, recorder);
     if (bridge.deck.kind === "concrete" && bridge.deck.thicknessIn !== null) {
       const tmin = leastDeckThickness.of(spacingFt);
       recorder?.step(leastDeckThickness, tmin, spacingFt);

@@ -1,11 +1,5 @@
 import { formula } from "../../formula.js";
 
-/** Moment of a uniform load at midspan. Source: statics. */
-export const uniformMoment = (symbol: string, load: string) =>
-  formula(symbol, `${load} * L^2 / 8`, "kip-ft", "statics", [load, "L"], (w: number, L: number) => (w * L * L) / 8);
-export const momentStage1 = uniformMoment("M1", "w1");
-export const momentStage2 = uniformMoment("M2", "w2");
-export const momentWearing = uniformMoment("Mw", "ww");
 /** All dead moment on the bare section. Source: statics. */
 export const deadMoment = formula(
   "MD",
@@ -15,16 +9,6 @@ export const deadMoment = formula(
   ["M1", "M2", "Mw"],
   (M1: number, M2: number, Mw: number) => M1 + M2 + Mw,
 );
-/** All dead shear at the bearing. Source: statics. */
-export const deadShear = formula(
-  "VD",
-  "(w1 + w2 + ww) * L / 2",
-  "kip",
-  "statics",
-  ["w1", "w2", "ww", "L"],
-  (w1: number, w2: number, ww: number, L: number) => ((w1 + w2 + ww) * L) / 2,
-);
-
 /** Live moment with impact on one stringer. Source: AASHTO Standard Specifications, 17th ed., Art. 3.8.2, 3.23. */
 export const liveMoment = formula(
   "ML",

@@ -1,6 +1,4 @@
-/** Fatigue details of the load and resistance factor specification. */
-export const LRFD_FATIGUE_DETAILS = ["A", "B", "B'", "C", "C'", "D", "E", "E'"] as const;
-export type LrfdFatigueDetail = (typeof LRFD_FATIGUE_DETAILS)[number];
+import type { LrfdFatigueDetail } from "../../bridge/bridge.js";
 
 /** Detail constant A, 10^8 ksi^3, and constant-amplitude threshold, ksi. */
 interface DetailConstants {

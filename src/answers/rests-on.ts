@@ -29,6 +29,7 @@ interface Flip {
 /** A narrow curb, the weaker grade, light traffic: the plausible others of what is taken when nobody says. Source: common practice. */
 const NARROW_CURB_FT = 0.5;
 const LIGHT_TRAFFIC_ADTT = 1000;
+const LIGHT_TRAFFIC_ADTT_SL = 500;
 const HEAVY_TRAFFIC_ADTT = 5000;
 
 /** Each assumption that the user did not state, flipped to its plausible other; only those that change the shape or fail it. */
@@ -50,7 +51,8 @@ function flips(bridge: Bridge): Flip[] {
   }
   if (unstated("liveLoad.adtt")) {
     const { adtt } = bridge.liveLoad;
-    const other = adtt === null || adtt >= 2500 ? LIGHT_TRAFFIC_ADTT : HEAVY_TRAFFIC_ADTT;
+    const light = bridge.specification === "lrfd" ? LIGHT_TRAFFIC_ADTT_SL : LIGHT_TRAFFIC_ADTT;
+    const other = adtt === null || adtt > light ? light : HEAVY_TRAFFIC_ADTT;
     list.push({ key: "liveLoad.adtt", flippedTo: other, changes: { "liveLoad.adtt": other } });
   }
   if (unstated("bracing.topFlange")) {

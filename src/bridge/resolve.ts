@@ -293,12 +293,13 @@ class Draft {
     }
   }
 
+  /** In one file fyKsi stands for the grade; typed together they contradict each other. */
   settleSteel(): void {
     const fy = this.#number("steel.fyKsi");
     const grade = this.#values.get("steel.grade") as keyof typeof GRADE_YIELD_KSI;
-    const gradeLayer = this.#layers.get("steel.grade");
-    if (fy !== null && gradeLayer !== undefined && gradeLayer === this.#layers.get("steel.fyKsi") && gradeLayer.source !== "practice") {
-      if (GRADE_YIELD_KSI[grade] !== fy) this.#fault("steel.fyKsi", `Fy ${fy} ksi and grade ${grade} together`, "one of the two");
+    const [gradeLayer, stressLayer] = [this.#layers.get("steel.grade"), this.#layers.get("steel.fyKsi")];
+    if (fy !== null && gradeLayer === stressLayer && stressLayer?.source === "flag" && GRADE_YIELD_KSI[grade] !== fy) {
+      this.#fault("steel.fyKsi", `Fy ${fy} ksi and grade ${grade} together`, "one of the two");
     }
   }
 

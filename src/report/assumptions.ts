@@ -95,7 +95,7 @@ function military(bridge: Bridge): string[] {
 function distributionText({ specification, deck }: Bridge): string {
   const trucks = "trucks 4 ft apart regardless of lane lines, curbs ignored for interior stringers (conservative)";
   if (specification === "lfd") {
-    return `Live load to each stringer by Table 3.23.1 in wheel lines, the lever rule beyond its range and for exterior stringers; ${trucks}.`;
+    return `Live load to each stringer by Table 3.23.1 in wheel lines, the lever rule beyond its range and for exterior stringers, under concrete with the floor of 3.23.2.3.1.5 but for one lane loaded; ${trucks}.`;
   }
   const rule =
     deck.kind === "concrete"

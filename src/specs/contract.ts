@@ -14,6 +14,7 @@ export type CheckId =
   | "web-slenderness"
   | "slenderness-interaction"
   | "bracing"
+  | "diaphragm-spacing"
   | "ductility"
   | "shear"
   | "overload"

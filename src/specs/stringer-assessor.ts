@@ -19,7 +19,7 @@ const SLOTS = [
   "web-slenderness",
   "slenderness-interaction",
   "bracing",
-  "bracing-advisory",
+  "diaphragm-spacing",
   "ductility",
   "shear",
   "overload",
@@ -36,7 +36,6 @@ const SLOTS = [
   "deck-thickness",
   "distribution-sum",
 ] as const;
-/** A place for one check: its id, but that bracing has a second, advisory one. */
 export type Slot = (typeof SLOTS)[number];
 const PLACE = Object.fromEntries(SLOTS.map((slot, place) => [slot, place])) as Readonly<Record<Slot, number>>;
 
@@ -46,7 +45,7 @@ const KIND: Readonly<Record<Slot, CheckKind>> = {
   "web-slenderness": "limit",
   "slenderness-interaction": "limit",
   bracing: "limit",
-  "bracing-advisory": "advisory",
+  "diaphragm-spacing": "advisory",
   ductility: "limit",
   shear: "demand",
   overload: "demand",
@@ -103,9 +102,7 @@ export abstract class StringerAssessor implements Assessor {
     this.#used = SLOTS.map((slot) => chosen(slot)?.use !== "off");
     this.#advisoriesRequired = Object.values(bridge.advisories).includes("enforce");
     this.ratios = new Float64Array(this.positions.length * SLOTS.length).fill(ABSENT);
-    this.slots = this.positions.flatMap((position) =>
-      SLOTS.map((slot, place) => ({ position, id: slot === "bracing-advisory" ? "bracing" : slot, kind: this.#kinds[place] })),
-    );
+    this.slots = this.positions.flatMap((position) => SLOTS.map((slot, place) => ({ position, id: slot, kind: this.#kinds[place] })));
   }
 
   assess(steel: Steel, recorder: AssessmentRecorder | null): void {
@@ -142,7 +139,7 @@ export abstract class StringerAssessor implements Assessor {
     this.ratios[index * SLOTS.length + place] = ratio;
     const kind = this.#kinds[place];
     if (this.#screening && !(ratio <= 1) && kind !== "advisory") this.settled = true;
-    recorder?.check({ id: slot === "bracing-advisory" ? "bracing" : slot, kind, article, demand, capacity, unit, ratio, ok: ratio <= 1 });
+    recorder?.check({ id: slot, kind, article, demand, capacity, unit, ratio, ok: ratio <= 1 });
   }
 
   /** Advisories on the layout, the same in every specification: overhang, limits of the practice, a lane nearly gained. */

@@ -49,7 +49,7 @@ export function advisoryLines(assessment: Assessment): string[] {
 function advisoryWords({ id, demand, capacity, unit, article }: Check): string {
   const [required, provided] = [`${shown(demand)} ${unit}`, `${shown(capacity)} ${unit}`];
   switch (id) {
-    case "bracing":
+    case "diaphragm-spacing":
       return `diaphragms at ${required}, at most ${provided} (${article})`;
     case "overhang":
       return `${required} is beyond ${provided}; twisting of the fascia stringer at the pour is not computed`;

@@ -100,7 +100,7 @@ export interface FlexureCapacity {
   webSlenderness: number;
   flangeLimit: number;
   webLimit: number;
-  /** D/tw + 9.35 bf/2tf where it counts, else 0. */
+  /** D/tw + 9.35 bf/2tf; it can only bind when both exceed 75 % of their limits. */
   interaction: number;
   interactionLimit: number;
   /** Greatest unbraced length of the route, in; Infinity on the partially braced route, whose capacity takes the length in. */
@@ -150,16 +150,14 @@ export function flexureCapacity(shape: Shape, Fy: number, unbracedLengthIn: numb
   recorder?.step(compactWebLimit, lwp, Fy);
   out.flangeSlenderness = lf;
   out.webSlenderness = lw;
-  out.interaction = 0;
+  out.interaction = interaction.of(lw, lf);
+  recorder?.step(interaction, out.interaction, lw, lf);
   out.interactionLimit = interactionLimit.of(Fy);
-  if (lf > 0.75 * lfp && lw > 0.75 * lwp) {
-    out.interaction = interaction.of(lw, lf);
-    recorder?.step(interaction, out.interaction, lw, lf);
-    recorder?.step(interactionLimit, out.interactionLimit, Fy);
-  }
+  recorder?.step(interactionLimit, out.interactionLimit, Fy);
+  const interacting = lf > 0.75 * lfp && lw > 0.75 * lwp;
   const Lpc = compactBracing.of(ry, Fy);
   recorder?.step(compactBracing, Lpc, ry, Fy);
-  if (lf <= lfp && lw <= lwp && out.interaction <= out.interactionLimit && unbracedLengthIn <= Lpc) {
+  if (lf <= lfp && lw <= lwp && (!interacting || out.interaction <= out.interactionLimit) && unbracedLengthIn <= Lpc) {
     out.route = "compact";
     out.article = "10.48.1";
     out.flangeLimit = lfp;
@@ -169,7 +167,6 @@ export function flexureCapacity(shape: Shape, Fy: number, unbracedLengthIn: numb
     recorder?.step(compactMoment, out.capacityKipFt, Fy, Zx);
     return;
   }
-  out.interaction = 0;
   out.flangeLimit = NONCOMPACT_FLANGE_LIMIT;
   out.webLimit = NONCOMPACT_WEB_LIMIT;
   const Fcr = flangeStress.of(Fy, lf);

@@ -28,6 +28,9 @@ import { constructionLoad, pourMoment } from "./pour.js";
 import { shearCapacityKip, withoutBearingStiffeners } from "./shear.js";
 import { FATIGUE_VEHICLE, type LfdLayout, lfdLayout, type StringerLoads, stringerLoads } from "./stringer-loads.js";
 
+/** Greatest distance of diaphragms, ft. Source: AASHTO Standard Specifications, 17th ed., Art. 10.20.1. */
+const DIAPHRAGMS_AT_MOST_FT = 25;
+
 /** Loads and moments of one stringer with one shape. One object is used again and again. */
 export interface LfdEffects {
   w1: number;
@@ -271,6 +274,7 @@ export abstract class LfdStringers extends StringerAssessor {
     const bmin = leastFlangeWidth.of(bridge.spanFt, bridge.pieceOverlapFt);
     recorder?.step(leastFlangeWidth, bmin, bridge.spanFt, bridge.pieceOverlapFt);
     this.check(index, "handling", bmin, shape.flangeWidthIn, "in", "common practice", recorder);
+    this.check(index, "diaphragm-spacing", bridge.bracing.diaphragmSpacingFt, DIAPHRAGMS_AT_MOST_FT, "ft", "10.20.1", recorder);
     this.adviseLayout(index, bridge, shape, recorder);
     if (bridge.deck.kind === "concrete" && bridge.deck.thicknessIn !== null) {
       const tmin = leastDeckThickness.of(spacingFt);

@@ -8,9 +8,6 @@ import { type FlexureCapacity, flexureCapacity, newFlexureCapacity, requiredZ } 
 import { LfdStringers } from "./lfd-stringers.js";
 import * as factors from "./load-factors.js";
 
-/** Greatest distance of diaphragms, ft. Source: AASHTO Standard Specifications, 17th ed., Art. 10.20.1. */
-const DIAPHRAGMS_AT_MOST_FT = 25;
-
 /** Noncomposite stringers by load factor design. Source: AASHTO Standard Specifications, 17th ed. (2002), Divisions 3 and 10. */
 export class NoncompositeStringers extends LfdStringers {
   readonly #unbracedIn: number;
@@ -46,6 +43,7 @@ export class NoncompositeStringers extends LfdStringers {
 
   #checkFlexure(index: number, { shape, fyKsi: Fy }: Steel, recorder: AssessmentRecorder | null): void {
     const flexure = this.#capacity;
+    const { spanFt } = this.design.bridge;
     recorder?.topic("flexure");
     recorder?.value("Lb", this.#unbracedIn, "in", this.design.bridge.bracing.topFlange === "held" ? "top flange held" : "diaphragms");
     flexureCapacity(shape, Fy, this.#unbracedIn, flexure, recorder);
@@ -54,14 +52,12 @@ export class NoncompositeStringers extends LfdStringers {
     this.check(index, "flexure", this.effects.Mu, flexure.capacityKipFt, "kip-ft", flexure.article, recorder);
     this.check(index, "flange-slenderness", flexure.flangeSlenderness, flexure.flangeLimit, "-", flexure.article, recorder);
     this.check(index, "web-slenderness", flexure.webSlenderness, flexure.webLimit, "-", flexure.article, recorder);
-    if (flexure.interaction > 0) {
+    if (flexure.route === "compact") {
       this.check(index, "slenderness-interaction", flexure.interaction, flexure.interactionLimit, "-", "10.48.1.1(b)", recorder);
     }
-    if (flexure.bracingLimitIn < Number.POSITIVE_INFINITY) {
-      this.check(index, "bracing", this.#unbracedIn, flexure.bracingLimitIn, "in", flexure.article, recorder);
-    } else {
-      this.check(index, "bracing-advisory", this.#unbracedIn / IN_PER_FT, DIAPHRAGMS_AT_MOST_FT, "ft", "10.20.1", recorder);
-    }
+    // The partially braced capacity takes the unbraced length in, so only the span bounds it there.
+    const limit = flexure.route === "partially-braced" ? spanFt * IN_PER_FT : flexure.bracingLimitIn;
+    this.check(index, "bracing", this.#unbracedIn, limit, "in", flexure.article, recorder);
   }
 
   /** Overload stress in either flange; returns the S it requires, in3. */

@@ -9,7 +9,7 @@ import { byHandLines } from "../../../src/report/by-hand.js";
 import { CATALOGUE, preparedOf, questionOf, VEHICLES } from "../../support/question.js";
 
 /** Invented bridges that between them reach every kind of rescue, flip and position. */
-const BRIDGES: readonly Readonly<Record<string, unknown>>[] = [
+const LFD_BRIDGES: readonly Readonly<Record<string, unknown>>[] = [
   { spanFt: 60, "deck.outToOutFt": 33 },
   { spanFt: 48.5, "deck.outToOutFt": 30, "deck.thicknessIn": 8, "liveLoad.adtt": 450, "steel.grade": "50W" },
   { spanFt: 35, "deck.outToOutFt": 24, "steel.grade": "36", "liveLoad.adtt": 50 },
@@ -27,6 +27,14 @@ const BRIDGES: readonly Readonly<Record<string, unknown>>[] = [
     "barriers.weightKlf": 0.05,
     "stringers.minCount": 3,
   },
+];
+
+const BRIDGES: readonly Readonly<Record<string, unknown>>[] = [
+  ...LFD_BRIDGES.map((bridge) => ({ specification: "lfd", "deck.composite": false, ...bridge })),
+  { spanFt: 60, "deck.outToOutFt": 33 },
+  { spanFt: 80, "deck.outToOutFt": 40, "liveLoad.adtt": 300, "steel.grade": "36" },
+  { spanFt: 45, "deck.outToOutFt": 28, "deck.composite": false },
+  { spanFt: 60, "deck.outToOutFt": 33, specification: "lfd" },
 ];
 
 /** The keys by which a plain question would ask for a rescue's change. */
@@ -132,14 +140,21 @@ describe("rests on", () => {
   });
 
   it("leaves out what the user stated and what changes nothing", () => {
-    const stated = { "barriers.baseFt": 1.5, "steel.grade": "50", "liveLoad.adtt": 3000, "bracing.topFlange": "diaphragms" };
+    const stated = {
+      specification: "lfd",
+      "deck.composite": false,
+      "barriers.baseFt": 1.5,
+      "steel.grade": "50",
+      "liveLoad.adtt": 3000,
+      "bracing.topFlange": "diaphragms",
+    };
     const answer = lightest(preparedOf({ spanFt: 60, "deck.outToOutFt": 33, "deflection.use": "enforce", ...stated }), 1);
     expect(answer.restsOn).toEqual([]);
   });
 
   it("says when a narrower curb brings another lane", () => {
     // 22 ft less two 1.5 ft bases is 19 ft, one lane; with 0.5 ft curbs it is 21 ft, two lanes (Standard Specifications 3.6).
-    const { restsOn } = lightest(preparedOf({ spanFt: 40, "deck.outToOutFt": 22 }), 1);
+    const { restsOn } = lightest(preparedOf({ spanFt: 40, "deck.outToOutFt": 22, specification: "lfd", "deck.composite": false }), 1);
     const curb = restsOn.find(({ key }) => key === "barriers.baseFt");
     expect(curb?.outcome).toBe("fails");
     expect(curb?.lanes).toBe(2);
@@ -159,9 +174,21 @@ describe("by hand", () => {
     near(w1 + w2 + ww, sum);
     const [, deadMoment] = /= ([\d.]+) kip-ft/.exec(dead) ?? [];
     near((sum * prepared.bridge.spanFt ** 2) / 8, Number(deadMoment));
+    if (prepared.bridge.specification === "lrfd") {
+      const [, lane, share, moment] = /Live: ([\d.]+) .* x ([\d.]+) lanes = ([\d.]+)/.exec(live) ?? [];
+      near(Number(lane) * Number(share), Number(moment));
+      const [, dc, dw, ll, Mu] = /1\.25 x ([\d.]+) \+ 1\.50 x ([\d.]+) \+ 1\.75 x ([\d.]+) = ([\d.]+)/.exec(need) ?? [];
+      near(1.25 * Number(dc) + 1.5 * Number(dw) + 1.75 * Number(ll), Number(Mu));
+      return;
+    }
     const [, table, factor, impact, liveMoment] =
       /Live: ([\d.]+) .* \/ 2 x ([\d.]+) wheel lines x ([\d.]+) impact = ([\d.]+)/.exec(live) ?? [];
     near((Number(table) / 2) * Number(factor) * Number(impact), Number(liveMoment));
+    if (prepared.bridge.deck.composite) {
+      const [, MD, ML, Mu] = /1\.3 x \(([\d.]+) \+ 1\.67 x ([\d.]+)\) = ([\d.]+)/.exec(need) ?? [];
+      near(1.3 * (Number(MD) + 1.67 * Number(ML)), Number(Mu));
+      return;
+    }
     const [, D, k, LL, below, required] = /\(([\d.]+) \+ ([\d./]+) x ([\d.]+)\) \/ (\(0\.80 x \d+\)|\d+) = ([\d.]+) in3/.exec(need) ?? [];
     const factorOfLive = k === "5/3" ? 5 / 3 : Number(k);
     const divisor = below.startsWith("(") ? 0.8 * byHand.assessment.fyKsi : byHand.assessment.fyKsi / 1.3;
@@ -186,9 +213,10 @@ describe("a vehicle of the user's own", () => {
     const vehicles = [...VEHICLES, ...own];
     for (const spanFt of [25, 60, 100]) {
       const ask = (vehicle: string) =>
-        lightest(prepare(questionOf({ spanFt, "deck.outToOutFt": 33, "liveLoad.vehicle": vehicle }, CATALOGUE, vehicles)), 5).options.map(
-          ({ assessment }) => [assessment.shape, assessment.layout, assessment.governing],
-        );
+        lightest(
+          prepare(questionOf({ spanFt, specification: "lfd", "deck.outToOutFt": 33, "liveLoad.vehicle": vehicle }, CATALOGUE, vehicles)),
+          5,
+        ).options.map(({ assessment }) => [assessment.shape, assessment.layout, assessment.governing]);
       expect(ask("own TWENTY")).toEqual(ask("HS20-44"));
     }
   });

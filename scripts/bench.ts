@@ -45,21 +45,23 @@ function startRatio(): void {
   );
 }
 
-function question() {
+function question(specification: string) {
   const vehicles = readVehicles(text("data/vehicles.json"), "vehicles.json", []);
   const layers = [
     readLayer(text("data/practice.json"), "practice.json", "practice"),
     flagLayer([
       { flag: "--span", key: "spanFt", text: "60" },
       { flag: "--width", key: "deck.outToOutFt", text: "33" },
+      { flag: "--spec", key: "specification", text: specification },
+      { flag: "--composite", key: "deck.composite", text: String(specification === "lrfd") },
     ]),
   ];
   const { shapes } = readShapes(text("data/w-shapes.csv"), "w-shapes.csv", { bundled: true });
   return prepare(ask(layers, "layout", shapes, vehicles));
 }
 
-function assessmentRate(): void {
-  const { space } = question();
+function assessmentRate(specification: string, name: string): void {
+  const { space } = question(specification);
   const pass = (): { assessed: number; checksum: number } => {
     let assessed = 0;
     let checksum = 0;
@@ -77,12 +79,14 @@ function assessmentRate(): void {
   let assessed = 0;
   for (let round = 0; round < ROUNDS; round++) assessed += pass().assessed;
   const seconds = (performance.now() - start) / 1000;
-  console.log(`full assessments: ${Math.round(assessed / seconds)} a second on one core (checksum of ratios ${checksum.toFixed(6)})`);
+  console.log(
+    `${name}: full assessments: ${Math.round(assessed / seconds)} a second on one core (checksum of ratios ${checksum.toFixed(6)})`,
+  );
   const began = performance.now();
   for (let round = 0; round < ROUNDS; round++) rank(space, 5);
   const ranked = (performance.now() - began) / 1000;
   console.log(
-    `the ranker's question: ${Math.round(assessed / ranked)} candidates settled a second, ${(seconds / ranked).toFixed(2)} times the full search`,
+    `${name}: the ranker's question: ${Math.round(assessed / ranked)} candidates settled a second, ${(seconds / ranked).toFixed(2)} times the full search`,
   );
 }
 
@@ -106,5 +110,6 @@ function peakMemory(): void {
 }
 
 startRatio();
-assessmentRate();
+assessmentRate("lfd", "lfd noncomposite");
+assessmentRate("lrfd", "lrfd composite");
 peakMemory();

@@ -72,6 +72,8 @@ export abstract class LfdStringers extends StringerAssessor {
   /** Distance of the diaphragms, in. */
   protected readonly diaphragmsIn: number;
   readonly #fatigue: FatigueCase;
+  /** Sum of the moment factors of all stringers, wheel lines. */
+  readonly #factorSum: number;
 
   constructor(design: Design, layout: Layout) {
     const { bridge } = design;
@@ -79,6 +81,8 @@ export abstract class LfdStringers extends StringerAssessor {
     this.design = design;
     this.fixed = lfdLayout(design, layout);
     this.stringers = this.positions.map((position) => stringerLoads(this.fixed, position, null));
+    const factorOf = (position: Position): number => this.stringers.find((one) => one.position === position)?.factors.moment.factor ?? 0;
+    this.#factorSum = ((layout.count ?? 0) - 2) * factorOf("interior") + 2 * factorOf("exterior");
     this.diaphragmsIn = bridge.bracing.diaphragmSpacingFt * IN_PER_FT;
     this.#fatigue = fatigueCase(bridge.liveLoad.adtt, allowedRanges(bridge.liveLoad.fatigueDetail as LfdFatigueDetail, layout.count));
   }
@@ -284,9 +288,7 @@ export abstract class LfdStringers extends StringerAssessor {
     if (this.layout.count !== null) {
       const { lanes } = bridge.liveLoad;
       const needed = 2 * lanes * laneReduction(lanes);
-      const factorOf = (position: Position): number => this.stringers.find((one) => one.position === position)?.factors.moment.factor ?? 0;
-      const sum = (this.layout.count - 2) * factorOf("interior") + 2 * factorOf("exterior");
-      this.check(index, "distribution-sum", needed, sum, "wheel lines", "statics", recorder);
+      this.check(index, "distribution-sum", needed, this.#factorSum, "wheel lines", "statics", recorder);
     }
   }
 

@@ -34,23 +34,33 @@ export const stiffnessTerm = formula(
   ["Kg", "L", "ts"],
   (Kg: number, L: number, ts: number) => (Kg / (12 * L * ts ** 3)) ** 0.1,
 );
-/** Moment, interior, one lane. Source: AASHTO LRFD, 9th ed., Table 4.6.2.2.2b-1. */
-export const momentOneLane = formula(
-  "gm1",
-  "0.06 + (S / 14)^0.4 * (S / L)^0.3 * k",
-  "lanes",
+/** What spacing and span make of the moment formulas, one lane and more. Source: AASHTO LRFD, 9th ed., Table 4.6.2.2.2b-1. */
+export const spacingTermOne = formula(
+  "a1",
+  "(S / 14)^0.4 * (S / L)^0.3",
+  "-",
   "4.6.2.2.2b",
-  ["S", "L", "k"],
-  (S: number, L: number, k: number) => 0.06 + (S / 14) ** 0.4 * (S / L) ** 0.3 * k,
+  ["S", "L"],
+  (S: number, L: number) => (S / 14) ** 0.4 * (S / L) ** 0.3,
 );
+export const spacingTermMore = formula(
+  "a2",
+  "(S / 9.5)^0.6 * (S / L)^0.2",
+  "-",
+  "4.6.2.2.2b",
+  ["S", "L"],
+  (S: number, L: number) => (S / 9.5) ** 0.6 * (S / L) ** 0.2,
+);
+/** Moment, interior, one lane. Source: AASHTO LRFD, 9th ed., Table 4.6.2.2.2b-1. */
+export const momentOneLane = formula("gm1", "0.06 + a1 * k", "lanes", "4.6.2.2.2b", ["a1", "k"], (a1: number, k: number) => 0.06 + a1 * k);
 /** Moment, interior, two or more lanes. Source: AASHTO LRFD, 9th ed., Table 4.6.2.2.2b-1. */
 export const momentMoreLanes = formula(
   "gm2",
-  "0.075 + (S / 9.5)^0.6 * (S / L)^0.2 * k",
+  "0.075 + a2 * k",
   "lanes",
   "4.6.2.2.2b",
-  ["S", "L", "k"],
-  (S: number, L: number, k: number) => 0.075 + (S / 9.5) ** 0.6 * (S / L) ** 0.2 * k,
+  ["a2", "k"],
+  (a2: number, k: number) => 0.075 + a2 * k,
 );
 /** Shear, interior. Source: AASHTO LRFD, 9th ed., Table 4.6.2.2.3a-1. */
 export const shearOneLane = formula("gv1", "0.36 + S / 25", "lanes", "4.6.2.2.3a", ["S"], (S: number) => 0.36 + S / 25);
@@ -191,6 +201,9 @@ export interface LrfdShare {
   readonly rigidOne: number;
   /** Whether the concrete formulas hold as far as the shape does not matter; of the exterior stringer, de too. */
   readonly inRange: boolean;
+  /** What spacing and span make of the moment formulas. */
+  readonly termOne: number;
+  readonly termMore: number;
   readonly other: { readonly moment: number; readonly shear: number; readonly fatigue: number; readonly rule: string } | null;
 }
 
@@ -208,7 +221,15 @@ export function lrfdShare(bridge: Bridge, place: LrfdPlace, recorder: Recorder |
   const leverOne = leverLanes(place, 1, multiplePresence, "gl1", recorder);
   const leverFatigue = leverLanes(place, 1, NO_PRESENCE, "glf", recorder);
   const rigid = rigidLanes(place, recorder);
+  const termOne = spacingTermOne.of(place.spacingFt, place.spanFt);
+  const termMore = spacingTermMore.of(place.spacingFt, place.spanFt);
+  if (bridge.deck.kind === "concrete") {
+    recorder?.step(spacingTermOne, termOne, place.spacingFt, place.spanFt);
+    recorder?.step(spacingTermMore, termMore, place.spacingFt, place.spanFt);
+  }
   return {
+    termOne,
+    termMore,
     place,
     given: bridge.liveLoad.distribution,
     lever,
@@ -357,16 +378,21 @@ function byLeverRule(share: LrfdShare, out: LrfdFactors): void {
   fill(out, all, all, Math.max(share.leverFatigue, share.rigidOne), rule, rule);
 }
 
-function interior({ place, lever, leverFatigue }: LrfdShare, k: number, out: LrfdFactors, recorder: Recorder | null): void {
-  const { spacingFt: S, spanFt: L, lanes, count } = place;
-  const one = momentOneLane.of(S, L, k);
-  recorder?.step(momentOneLane, one, S, L, k);
+function interior(
+  { place, lever, leverFatigue, termOne, termMore }: LrfdShare,
+  k: number,
+  out: LrfdFactors,
+  recorder: Recorder | null,
+): void {
+  const { spacingFt: S, lanes, count } = place;
+  const one = momentOneLane.of(termOne, k);
+  recorder?.step(momentOneLane, one, termOne, k);
   let moment = one;
   let shear = shearOneLane.of(S);
   recorder?.step(shearOneLane, shear, S);
   if (lanes >= 2) {
-    const more = momentMoreLanes.of(S, L, k);
-    recorder?.step(momentMoreLanes, more, S, L, k);
+    const more = momentMoreLanes.of(termMore, k);
+    recorder?.step(momentMoreLanes, more, termMore, k);
     moment = Math.max(one, more);
     const moreShear = shearMoreLanes.of(S);
     recorder?.step(shearMoreLanes, moreShear, S);
@@ -380,8 +406,8 @@ function interior({ place, lever, leverFatigue }: LrfdShare, k: number, out: Lrf
 }
 
 function exterior(share: LrfdShare, k: number, out: LrfdFactors, recorder: Recorder | null): void {
-  const { place, lever, leverOne, leverFatigue, rigid, rigidOne } = share;
-  const { spacingFt: S, spanFt: L, lanes, count, curbInsideFt } = place;
+  const { place, lever, leverOne, leverFatigue, rigid, rigidOne, termMore } = share;
+  const { spacingFt: S, lanes, count, curbInsideFt } = place;
   const de = curbInsideFt ?? 0;
   const few = count === FEW_STRINGERS;
   let moment = leverOne;
@@ -389,8 +415,8 @@ function exterior(share: LrfdShare, k: number, out: LrfdFactors, recorder: Recor
   let momentRule = "lever rule, one truck";
   let shearRule = few ? "lever rule (three stringers)" : "lever rule, one truck";
   if (lanes >= 2) {
-    const more = momentMoreLanes.of(S, L, k);
-    recorder?.step(momentMoreLanes, more, S, L, k);
+    const more = momentMoreLanes.of(termMore, k);
+    recorder?.step(momentMoreLanes, more, termMore, k);
     const ge = exteriorMoment.of(de, more);
     recorder?.step(exteriorMoment, ge, de, more);
     const several = few ? Math.min(ge, lever) : ge;

@@ -158,18 +158,19 @@ export abstract class LrfdStringers extends StringerAssessor {
     if (this.ts > 0) recorder.value("n", this.n, "-", "modular ratio");
   }
 
-  /** Cross-section proportions, the worst of four. Source: AASHTO LRFD, 9th ed., Art. 6.10.2. */
+  /** Cross-section proportions, the worst of four, each as required over provided. Source: AASHTO LRFD, 9th ed., Art. 6.10.2. */
   protected checkProportions(index: number, shape: Shape, recorder: AssessmentRecorder | null): void {
     const { depthIn: d, flangeWidthIn: bf, flangeThicknessIn: tf, webThicknessIn: tw } = shape;
     const D = webDepth.of(d, tf);
-    let [demand, capacity, article] = [webSlenderness.of(D, tw), WEB_PROPORTION, "6.10.2.1.1"];
-    const consider = (required: number, provided: number, rule: string): void => {
-      if (required / provided > demand / capacity) [demand, capacity, article] = [required, provided, rule];
-    };
-    consider(flangeSlenderness.of(bf, tf), FLANGE_PROPORTION, "6.10.2.2-1");
-    consider(D / 6, bf, "6.10.2.2-2");
-    consider(1.1 * tw, tf, "6.10.2.2-3");
-    this.check(index, "proportions", demand, capacity, "-", article, recorder);
+    const web = webSlenderness.of(D, tw) / WEB_PROPORTION;
+    const flange = flangeSlenderness.of(bf, tf) / FLANGE_PROPORTION;
+    const width = D / 6 / bf;
+    const thickness = (1.1 * tw) / tf;
+    const worst = Math.max(web, flange, width, thickness);
+    if (worst === thickness) this.check(index, "proportions", 1.1 * tw, tf, "in", "6.10.2.2-3", recorder);
+    else if (worst === width) this.check(index, "proportions", D / 6, bf, "in", "6.10.2.2-2", recorder);
+    else if (worst === flange) this.check(index, "proportions", flange * FLANGE_PROPORTION, FLANGE_PROPORTION, "-", "6.10.2.2-1", recorder);
+    else this.check(index, "proportions", web * WEB_PROPORTION, WEB_PROPORTION, "-", "6.10.2.1.1", recorder);
   }
 
   /** Web shear; web at the supports. Source: AASHTO LRFD, 9th ed., Art. 6.10.9, D6.5. */
@@ -262,10 +263,16 @@ export abstract class LrfdStringers extends StringerAssessor {
     let capacity = Fnc;
     const yielding = rules.pourYielding.of(fbu, fl);
     recorder?.step(rules.pourYielding, yielding, fbu, fl);
-    if (yielding / Fy > demand / capacity) [demand, capacity] = [yielding, Fy];
+    if (yielding / Fy > demand / capacity) {
+      demand = yielding;
+      capacity = Fy;
+    }
     const Fl = rules.lateralLimit.of(Fy);
     recorder?.step(rules.lateralLimit, Fl, Fy);
-    if (fl / Fl > demand / capacity) [demand, capacity] = [fl, Fl];
+    if (fl / Fl > demand / capacity) {
+      demand = fl;
+      capacity = Fl;
+    }
     if (fl === 0) recorder?.note("brackets-not-covered");
     this.check(index, "deck-pour", demand, capacity, "ksi", "6.10.3.2", recorder);
   }

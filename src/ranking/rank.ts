@@ -37,22 +37,28 @@ function passingOf(group: Group): Option[] {
 
 /** The best layout of one count that a shape passes on, or null. */
 export function bestLayout(assessors: readonly Assessor[], steel: Steel): Option | null {
-  let best: { readonly ranked: Ranked; readonly index: number } | null = null;
-  const passes = assessors.map((assessor, index) => {
-    if (!stands(assessor.layout, steel)) return false;
-    if (!assessor.screen(steel)) return false;
-    const ranked = { steel, layout: assessor.layout, governingRatio: assessor.governingRatio };
-    if (best === null || byPreference(ranked, best.ranked) < 0) best = { ranked, index };
-    return true;
-  });
-  if (best === null) return null;
-  const { ranked, index } = best as { ranked: Ranked; index: number };
-  let first = index;
-  let last = index;
-  while (passes[first - 1]) first--;
-  while (passes[last + 1]) last++;
-  const range = [assessors[first].layout.spacingFt, assessors[last].layout.spacingFt] as const;
-  return { ...ranked, assessor: assessors[index], spacingRangeFt: range };
+  let best: Option | null = null;
+  for (let index = 0; index < assessors.length; index++) {
+    const assessor = assessors[index];
+    if (!passesOn(assessor, steel)) continue;
+    const { layout, governingRatio } = assessor;
+    const option = { steel, layout, governingRatio, assessor, spacingRangeFt: [layout.spacingFt, layout.spacingFt] as const };
+    if (best === null || byPreference(option, best) < 0) best = option;
+  }
+  return best === null ? null : { ...best, spacingRangeFt: passingRange(assessors, best) };
+}
+
+function passesOn(assessor: Assessor, steel: Steel): boolean {
+  return stands(assessor.layout, steel) && assessor.screen(steel);
+}
+
+/** Least and greatest of the neighbouring spacings at which the option's shape passes. */
+function passingRange(assessors: readonly Assessor[], { assessor, steel }: Option): readonly [number, number] {
+  let first = assessors.indexOf(assessor);
+  let last = first;
+  while (first > 0 && passesOn(assessors[first - 1], steel)) first--;
+  while (last + 1 < assessors.length && passesOn(assessors[last + 1], steel)) last++;
+  return [assessors[first].layout.spacingFt, assessors[last].layout.spacingFt];
 }
 
 /** The candidate nearest to passing: the smallest governing ratio, then the total order; null when no shape stands under the deck. */

@@ -34,10 +34,8 @@ export function searchSpace(
  * Every candidate is in exactly one group, so whoever stops after a whole group has missed none that weighs less.
  */
 export function groupsByWeight({ assessors, steels }: SearchSpace): readonly Group[] {
-  const byCount = new Map<number | null, Assessor[]>();
-  for (const assessor of assessors) byCount.set(assessor.layout.count, [...(byCount.get(assessor.layout.count) ?? []), assessor]);
-  const byWeight = new Map<number, Steel[]>();
-  for (const steel of steels) byWeight.set(steel.shape.weightPlf, [...(byWeight.get(steel.shape.weightPlf) ?? []), steel]);
+  const byCount = gathered(assessors, ({ layout }) => layout.count);
+  const byWeight = gathered(steels, ({ shape }) => shape.weightPlf);
   const groups: Group[] = [];
   for (const [count, ofCount] of byCount) {
     for (const [weightPlf, ofWeight] of byWeight) {
@@ -50,4 +48,14 @@ export function groupsByWeight({ assessors, steels }: SearchSpace): readonly Gro
 /** Whether a shape stands under a layout's deck: the outer flange does not reach beyond the edge. */
 export function stands({ overhangFt }: Layout, { shape }: Steel): boolean {
   return overhangFt === null || overhangFt >= shape.flangeWidthIn / 2 / IN_PER_FT - 1e-9;
+}
+
+function gathered<T, K>(items: readonly T[], keyOf: (item: T) => K): Map<K, T[]> {
+  const groups = new Map<K, T[]>();
+  for (const item of items) {
+    const group = groups.get(keyOf(item));
+    if (group === undefined) groups.set(keyOf(item), [item]);
+    else group.push(item);
+  }
+  return groups;
 }

@@ -74,6 +74,7 @@ function remarks(best: Assessment): string[] {
   if (advisories.length > 0) {
     lines.push("", `Advisories for ${best.shape} (reported, not required)`, ...advisories.flatMap((text) => wrap(text, WIDTH, "  ")));
   }
+  const studs = Math.max(0, ...best.stringers.map((stringer) => stringer.studs?.perStringer ?? 0));
   const supports = best.stringers.filter(({ support }) => support.stiffenersNeeded);
   lines.push(
     "",
@@ -81,6 +82,7 @@ function remarks(best: Assessment): string[] {
       ? `Bearing stiffeners: none needed (${best.stringers[0].support.article}).`
       : `Bearing stiffeners: needed at the ${supports.map(({ position }) => position).join(" and ")} stringers (${supports[0].support.article}).`,
   );
+  if (studs > 0) lines.push(`Studs by strength: ${studs} a stringer at most; fatigue pitch not computed.`);
   return lines;
 }
 

@@ -1,6 +1,7 @@
-import type { Bridge } from "../bridge/bridge.js";
+import type { Bridge, Source } from "../bridge/bridge.js";
 import type { BrokenLimit } from "../bridge/layouts.js";
-import type { Steel } from "../bridge/yield-stress.js";
+import { type Steel, yieldStress } from "../bridge/yield-stress.js";
+import type { Stock } from "../catalogue/shape.js";
 import type {
   AssessmentRecorder,
   Assessor,
@@ -14,6 +15,7 @@ import type {
   StudCount,
 } from "../specs/contract.js";
 import { LB_PER_KIP } from "../units.js";
+import { costPerFtOfBridge } from "./stock.js";
 
 /** A candidate with its checks, as answers show it. */
 export interface Assessment {
@@ -21,6 +23,8 @@ export interface Assessment {
   readonly weightPlf: number;
   readonly depthIn: number;
   readonly fyKsi: number;
+  /** Who gives the yield stress; "year built" for steel of unknown make. */
+  readonly fySource: Source | "year built";
   readonly source: { readonly file: string; readonly line: number };
   readonly layout: { readonly count: number | null; readonly spacingFt: number; readonly overhangFt: number | null };
   readonly brokenLimits: readonly BrokenLimit[];
@@ -32,6 +36,9 @@ export interface Assessment {
     readonly totalKip: number;
     readonly psfOfDeck: number | null;
   } | null;
+  /** What the row says of the pieces on hand, and the price of the steel per foot of bridge; null where it says nothing. */
+  readonly stock: Stock | null;
+  readonly costPerFtOfBridge: number | null;
   readonly passes: boolean;
   readonly governing: { readonly id: CheckId; readonly position: Position; readonly ratio: number };
   readonly stringers: readonly StringerAssessment[];
@@ -44,16 +51,20 @@ export function assessInFull(bridge: Bridge, assessor: Assessor, steel: Steel): 
   const slot = assessor.slots[assessor.governingSlot];
   const { layout } = assessor;
   const { shape, fyKsi } = steel;
+  const yieldFrom = yieldStress(bridge, shape);
   return {
     shape: shape.designation,
     weightPlf: shape.weightPlf,
     depthIn: shape.depthIn,
     fyKsi,
+    fySource: "issue" in yieldFrom ? "bridge" : yieldFrom.source,
     source: shape.source,
     layout: { count: layout.count, spacingFt: layout.spacingFt, overhangFt: layout.overhangFt },
     brokenLimits: layout.broken,
     steelPlfOfBridge: layout.count === null ? null : layout.count * shape.weightPlf,
     steel: layout.count === null ? null : steelOf(bridge, layout.count, shape.weightPlf),
+    stock: shape.stock,
+    costPerFtOfBridge: costPerFtOfBridge(steel, layout.count),
     passes: assessor.passes,
     governing: { id: slot.id, position: slot.position, ratio: assessor.governingRatio },
     stringers: recording.stringers(),

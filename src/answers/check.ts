@@ -37,14 +37,14 @@ export function check(prepared: Prepared, designation: string): CheckAnswer {
   return { assessment: assessInFull(bridge, chosen.assessor, steel), layoutsTried: space.assessors.length };
 }
 
-function steelNamed({ space, tooDeep }: Prepared, designation: string): Steel {
+function steelNamed({ space, leftOut }: Prepared, designation: string): Steel {
   const key = designationKey(designation);
   const steel = space.steels.find(({ shape }) => designationKey(shape.designation) === key);
   if (steel !== undefined) return steel;
   const names = space.steels.map(({ shape }) => shape.designation);
-  const deep = tooDeep.some((shape) => designationKey(shape.designation) === key);
+  const deep = leftOut.some(({ shape }) => designationKey(shape) === key);
   const problem = deep
-    ? `${designation} is deeper than the bridge allows`
+    ? `${designation} is left out: deeper than the bridge allows, or no sound plate left of it`
     : `no shape "${designation}" in the list${didYouMean(designation, names)}`;
   throw new InputError([
     { field: "SHAPE", problem, allowed: `a designation of the list, such as ${names[0] ?? "none: the list is empty"}` },

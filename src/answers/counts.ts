@@ -1,6 +1,7 @@
 import { nearestMiss, rank } from "../ranking/rank.js";
 import { type Assessment, assessInFull } from "./assessment.js";
 import { type Examined, examined, type Prepared, refuseTwoStringers } from "./question.js";
+import type { LeftOut } from "./stock.js";
 
 /** The best of one count, or what came nearest. */
 export interface CountRow {
@@ -13,6 +14,8 @@ export interface CountRow {
 
 /** One row for each count that fits the deck. */
 export interface CountsAnswer {
+  /** Shapes of the list that are not offered, and why. */
+  readonly leftOut: readonly LeftOut[];
   readonly examined: Examined;
   readonly counts: readonly CountRow[];
   readonly lightestCount: number | null;
@@ -40,6 +43,7 @@ export function counts(prepared: Prepared): CountsAnswer {
   const weights = rows.flatMap(({ count, best }) => (best === null ? [] : [{ count, plf: best.steelPlfOfBridge as number }]));
   const least = Math.min(...weights.map(({ plf }) => plf));
   return {
+    leftOut: prepared.leftOut,
     examined: examined(prepared),
     counts: rows,
     lightestCount: weights.find(({ plf }) => plf === least)?.count ?? null,

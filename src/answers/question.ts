@@ -10,12 +10,15 @@ import { type Vehicle, vehicleNamed } from "../loads/vehicles.js";
 import { type SearchSpace, searchSpace, stands } from "../search/search.js";
 import type { Design } from "../specs/contract.js";
 import { specificationOf } from "../specs/specification.js";
+import { type LeftOut, stockLimit, withLosses, withoutLimits } from "./stock.js";
 
 /** Everything a question about stringers is asked of. */
 export interface Question {
   readonly bridge: Bridge;
   readonly shapes: readonly Shape[];
   readonly vehicles: readonly Vehicle[];
+  /** Whether the stock of a list limits what is offered, or is left aside, as when one shape is checked. */
+  readonly stock: "limits" | "aside";
   /**
    * The same question with keys of the bridge file changed, as if flags had said so.
    *
@@ -36,12 +39,14 @@ export function ask(
   needs: ResolveOptions["needs"],
   shapes: readonly Shape[],
   vehicles: readonly Vehicle[],
+  stock: Question["stock"] = "limits",
 ): Question {
   return {
     bridge: resolveBridge(layers, { needs, vehicles }),
     shapes,
     vehicles,
-    vary: (changes) => ask([...layers, changeLayer(changes)], needs, shapes, vehicles),
+    stock,
+    vary: (changes) => ask([...layers, changeLayer(changes)], needs, shapes, vehicles, stock),
   };
 }
 
@@ -56,8 +61,8 @@ export interface Prepared {
   readonly design: Design;
   readonly layouts: Layouts;
   readonly space: SearchSpace;
-  /** Shapes of the list that a depth limit of the bridge leaves out. */
-  readonly tooDeep: readonly Shape[];
+  /** Shapes of the list that are not offered, and why. */
+  readonly leftOut: readonly LeftOut[];
 }
 
 /** How much was looked at. */
@@ -73,26 +78,42 @@ export interface Examined {
  * @throws {InputError} for a shape without a yield stress, and for one explicit layout under which no shape can stand
  */
 export function prepare(question: Question): Prepared {
-  const { bridge, shapes, vehicles } = question;
-  const tooDeep = shapes.filter((shape) => !shallowEnough(bridge, shape));
-  const steels = gradeShapes(
-    bridge,
-    shapes.filter((shape) => shallowEnough(bridge, shape)),
-  );
+  const { bridge, vehicles } = question;
   const vehicle = vehicleNamed(vehicles, bridge.liveLoad.vehicle);
   const design: Design = { bridge, vehicle, vehicles, live: laneEffects(vehicle, bridge.spanFt) };
   const layouts = layoutsOf(bridge);
+  const { steels, leftOut } = offered(question, layouts);
   refuseImpossible(bridge, layouts, steels);
-  return { question, bridge, design, layouts, space: searchSpace(specificationOf(bridge), design, layouts.layouts, steels), tooDeep };
+  const space = searchSpace(specificationOf(bridge), design, layouts.layouts, steels);
+  return { question, bridge, design, layouts, space, leftOut };
 }
 
-/** Whether a shape keeps within the bridge's greatest steel depth and structure depth. */
-function shallowEnough({ steel, deck }: Bridge, shape: Shape): boolean {
-  const structureIn = shape.depthIn + deck.haunchWeightIn + (deck.thicknessIn ?? 0);
-  return (
-    (steel.maxDepthIn === null || shape.depthIn <= steel.maxDepthIn) &&
-    (steel.maxStructureDepthIn === null || structureIn <= steel.maxStructureDepthIn)
-  );
+/** Shapes that bridge and stock let stand, with their yield stress and their losses taken off. */
+function offered({ bridge, shapes, stock }: Question, { layouts }: Layouts): { steels: readonly Steel[]; leftOut: readonly LeftOut[] } {
+  const counts = layouts.flatMap(({ count }) => (count === null ? [] : [count]));
+  const fewest = counts.length === 0 ? null : Math.min(...counts);
+  const leftOut: LeftOut[] = [];
+  const listed = stock === "limits" ? shapes : shapes.map(withoutLimits);
+  const kept = listed.filter((shape) => {
+    const reason = tooDeep(bridge, shape) ?? stockLimit(bridge, shape, fewest);
+    if (reason !== null) leftOut.push(reason);
+    return reason === null;
+  });
+  const steels = gradeShapes(bridge, kept).flatMap((steel) => {
+    const left = withLosses(steel);
+    if (left !== null) return [left];
+    leftOut.push({ shape: steel.shape.designation, line: steel.shape.source.line, code: "nothing-left", needed: 0, there: 0 });
+    return [];
+  });
+  return { steels, leftOut };
+}
+
+/** A shape beyond the bridge's greatest steel depth or structure depth, with the depth it may have; null within them. */
+function tooDeep({ steel, deck }: Bridge, shape: Shape): LeftOut | null {
+  const structure = (steel.maxStructureDepthIn ?? Number.POSITIVE_INFINITY) - deck.haunchWeightIn - (deck.thicknessIn ?? 0);
+  const there = Math.min(steel.maxDepthIn ?? Number.POSITIVE_INFINITY, structure);
+  if (shape.depthIn <= there) return null;
+  return { shape: shape.designation, line: shape.source.line, code: "too-deep", needed: shape.depthIn, there };
 }
 
 function refuseImpossible(bridge: Bridge, { layouts }: Layouts, steels: readonly Steel[]): void {

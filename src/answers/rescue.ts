@@ -18,7 +18,7 @@ export type Change =
 export interface Rescue {
   readonly change: Change;
   readonly assessment: Assessment;
-  /** Whether the steel of the whole bridge then weighs less than the answer's. */
+  /** Whether the steel of the whole bridge then weighs, or ranked by cost costs, less than the answer's. */
   readonly lighterThanAnswer: boolean;
 }
 
@@ -36,10 +36,8 @@ export function rescue(prepared: Prepared, winner: Option, steel: Steel): Rescue
   for (const attempt of attempts(prepared, winner, steel)) {
     const found = attempt();
     if (found?.assessment.passes !== true) continue;
-    const [weight, answer] = [found.assessment, winner].map((one) =>
-      "shape" in one ? one.weightPlf * (one.layout.count ?? 1) : one.steel.shape.weightPlf * (one.layout.count ?? 1),
-    );
-    return { ...found, lighterThanAnswer: weight < answer };
+    const measurePerFt = prepared.space.measure(steel.shape) * (found.assessment.layout.count ?? 1);
+    return { ...found, lighterThanAnswer: measurePerFt < winner.measurePerFt };
   }
   return null;
 }

@@ -1,5 +1,4 @@
 import type { Bridge } from "../bridge/bridge.js";
-import { steelPlfOf } from "../ranking/order.js";
 import { type Option, rank } from "../ranking/rank.js";
 import { type Assessment, assessInFull } from "./assessment.js";
 import type { Prepared } from "./question.js";
@@ -10,7 +9,7 @@ export interface RestsOn {
   readonly key: string;
   readonly value: string | number | null;
   readonly flippedTo: string | number;
-  /** `passes lighter`: something lighter passes; `fails`: the answer's candidate fails; `other shape`: another is first at no less weight. */
+  /** `passes lighter`: something lighter (ranked by cost, cheaper) passes; `fails`: the answer's candidate fails; `other shape`: another is first at no less weight. */
   readonly outcome: "passes lighter" | "fails" | "other shape";
   /** The failing candidate, or what is first then. */
   readonly assessment: Assessment;
@@ -65,12 +64,12 @@ function flips(bridge: Bridge): Flip[] {
   return list;
 }
 
-function flipped({ question, bridge }: Prepared, answer: Option, { key, flippedTo, changes }: Flip): RestsOn | null {
+function flipped({ question, bridge, space }: Prepared, answer: Option, { key, flippedTo, changes }: Flip): RestsOn | null {
   const { steel, layout } = answer;
   const variant = prepareVariant(question, changes, null);
   if (variant === null) return null;
   const same = checkVariant(question, changes, steel, layout);
-  const [first] = rank(variant.space, 1);
+  const [first] = rank({ ...variant.space, measure: space.measure }, 1);
   const firstInFull = first === undefined ? null : assessInFull(variant.bridge, first.assessor, first.steel);
   const [group, name] = key.split(".") as [keyof Bridge, string];
   const value = (bridge[group] as unknown as Record<string, string | number | null>)[name];
@@ -78,7 +77,7 @@ function flipped({ question, bridge }: Prepared, answer: Option, { key, flippedT
   const common = { key, value, flippedTo, lanes: lanes === bridge.liveLoad.lanes ? null : lanes };
   if (same !== null && !same.passes) return { ...common, outcome: "fails", assessment: same, instead: firstInFull };
   if (first === undefined || firstInFull === null) return null;
-  if (steelPlfOf(first) < steelPlfOf(answer)) return { ...common, outcome: "passes lighter", assessment: firstInFull, instead: null };
+  if (first.measurePerFt < answer.measurePerFt) return { ...common, outcome: "passes lighter", assessment: firstInFull, instead: null };
   const sameShape = firstInFull.shape === steel.shape.designation && first.layout.count === layout.count;
   return sameShape ? null : { ...common, outcome: "other shape", assessment: firstInFull, instead: null };
 }

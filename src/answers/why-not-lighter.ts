@@ -1,5 +1,5 @@
 import type { Option } from "../ranking/rank.js";
-import { stands } from "../search/search.js";
+import { feasible } from "../search/search.js";
 import { ABSENT, type CheckId } from "../specs/contract.js";
 import { type Assessment, assessInFull } from "./assessment.js";
 import type { Prepared } from "./question.js";
@@ -7,7 +7,7 @@ import { type Rescue, rescue } from "./rescue.js";
 
 /** Why no lighter shape serves on the winning layout. */
 export interface WhyNotLighter {
-  /** Shapes lighter than the winner. */
+  /** Shapes lighter than the winner; ranked by cost, cheaper ones. */
   readonly lighterShapes: number;
   /** How many of them fail each required check; a shape counts once under each check it fails. */
   readonly failing: Readonly<Partial<Record<CheckId, number>>>;
@@ -23,10 +23,10 @@ const NEAREST_SHOWN = 5;
 export function whyNotLighter(prepared: Prepared, winner: Option): WhyNotLighter {
   const { bridge, space } = prepared;
   const { assessor } = winner;
-  const lighter = space.steels.filter(({ shape }) => shape.weightPlf < winner.steel.shape.weightPlf);
+  const lighter = space.steels.filter(({ shape }) => space.measure(shape) < space.measure(winner.steel.shape));
   const failing: Partial<Record<CheckId, number>> = {};
   const missed = lighter
-    .filter((steel) => stands(assessor.layout, steel))
+    .filter((steel) => feasible(assessor.layout, steel))
     .map((steel) => {
       assessor.assess(steel, null);
       const ids = new Set<CheckId>();

@@ -4,6 +4,7 @@ import type { Bridge, Grade, Source } from "./bridge.js";
 
 /** A shape with the yield stress in force for it. */
 export interface Steel {
+  /** The shape as it is checked: where its row tells of thickness lost, with the figures of what is left. */
   readonly shape: Shape;
   readonly fyKsi: number;
 }
@@ -26,11 +27,33 @@ export function askedYieldStress(bridge: Bridge): { readonly fyKsi: number; read
   return { fyKsi: GRADE_YIELD_KSI[grade], source: gradeSource };
 }
 
-/** A shape's yield stress and its source, or why there is none. */
-export type YieldStress = { readonly fyKsi: number; readonly source: Source } | { readonly issue: InputIssue };
+/** Last year of each age of steel, and the yield stress taken for steel of unknown make from it, ksi. */
+const YIELD_BY_YEAR: readonly (readonly [upTo: number, fyKsi: number])[] = [
+  [1904, 26],
+  [1936, 30],
+  [1963, 33],
+  [Number.POSITIVE_INFINITY, 36],
+];
 
 /**
- * The yield stress in force for a shape: flag, else the row's own, else the bridge file, else, for the bundled catalogue alone, the practice.
+ * Yield stress of steel of unknown make.
+ *
+ * @param yearBuilt year in which it was built in; of a year on the border of two ages the weaker counts
+ * @returns ksi: before 1905 26, to 1936 30, to 1963 33, later 36
+ * Source: AASHTO Manual for Bridge Evaluation, steel of unknown type by year built (values from memory).
+ */
+export function yieldByYearKsi(yearBuilt: number): number {
+  const found = YIELD_BY_YEAR.find(([upTo]) => yearBuilt <= upTo);
+  if (found === undefined) throw new RangeError(`yearBuilt must be a number, got ${yearBuilt}`);
+  return found[1];
+}
+
+/** A shape's yield stress and its source, or why there is none. */
+export type YieldStress = { readonly fyKsi: number; readonly source: Source | "year built" } | { readonly issue: InputIssue };
+
+/**
+ * The yield stress in force for a shape: flag, else the row's own, given or by its year built, else the bridge file, else, for the bundled
+ * catalogue alone, the practice.
  *
  * @returns ksi with its source; a fault where a flag stands above the row's own figure, or nobody says what an own list's steel is
  * Source: common practice (old steel is never taken for today's grade unless somebody says so).
@@ -46,6 +69,7 @@ export function yieldStress(bridge: Bridge, shape: Shape): YieldStress {
     return asked;
   }
   if (shape.yieldStressKsi !== null) return { fyKsi: shape.yieldStressKsi, source: "list" };
+  if (typeof shape.stock?.yearBuilt === "number") return { fyKsi: yieldByYearKsi(shape.stock.yearBuilt), source: "year built" };
   if (asked.source === "bridge" || shape.bundled) return asked;
   return {
     issue: {

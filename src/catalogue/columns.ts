@@ -35,3 +35,15 @@ export const COLUMNS: readonly Column[] = [
 export const DESIGNATION_COLUMN = "designation";
 /** Optional column: the yield stress of the row's own steel, ksi. */
 export const YIELD_COLUMN = { name: "yieldStressKsi", min: 20, max: 70 } as const;
+
+/** Optional numeric columns of a yard's own list. */
+export const STOCK_COLUMNS = [
+  { name: "yearBuilt", min: 1850, max: 2100 },
+  { name: "quantity", min: 0, max: 1000000 },
+  { name: "usableLengthFt", min: 1, max: 400 },
+  { name: "pricePerLb", min: 0.0001, max: 1000 },
+  { name: "flangeLossIn", min: 0, max: 5 },
+  { name: "webLossIn", min: 0, max: 5 },
+] as const;
+/** Optional text column: where the pieces lie, or a note. */
+export const PLACE_COLUMN = "place";

@@ -24,6 +24,7 @@ export function mergeLists(lists: readonly (readonly Shape[])[]): readonly Shape
     if (first.yieldStressKsi !== shape.yieldStressKsi) {
       differing.push(`yieldStressKsi ${first.yieldStressKsi ?? "not given"} and ${shape.yieldStressKsi ?? "not given"}`);
     }
+    if (JSON.stringify(first.stock) !== JSON.stringify(shape.stock)) differing.push("other stock");
     if (differing.length > 0) {
       issues.push({
         file: shape.source.file,

@@ -1,8 +1,8 @@
 import { InputError, type InputIssue } from "../errors.js";
 import { didYouMean } from "../nearest.js";
-import { COLUMNS, DESIGNATION_COLUMN, YIELD_COLUMN } from "./columns.js";
+import { COLUMNS, DESIGNATION_COLUMN, PLACE_COLUMN, STOCK_COLUMNS, YIELD_COLUMN } from "./columns.js";
 import { type CsvRow, readCsvRows } from "./read-rows.js";
-import { designationKey, type Shape, type ShapeFigures } from "./shape.js";
+import { designationKey, type Shape, type ShapeFigures, type Stock } from "./shape.js";
 
 /** A list read: its shapes, and remarks for the reader's eye that stop nothing. */
 export interface ShapeList {
@@ -10,7 +10,8 @@ export interface ShapeList {
   readonly remarks: readonly string[];
 }
 
-const KNOWN_COLUMNS = [DESIGNATION_COLUMN, ...COLUMNS.map((column) => column.name), YIELD_COLUMN.name] as const;
+const REQUIRED_COLUMNS: readonly string[] = [DESIGNATION_COLUMN, ...COLUMNS.map(({ name }) => name)];
+const KNOWN_COLUMNS: readonly string[] = [...REQUIRED_COLUMNS, YIELD_COLUMN.name, ...STOCK_COLUMNS.map(({ name }) => name), PLACE_COLUMN];
 const PLAIN_NUMBER = /^[+-]?(\d+(\.\d*)?|\.\d+)([eE][+-]?\d+)?$/;
 
 /**
@@ -26,7 +27,7 @@ const PLAIN_NUMBER = /^[+-]?(\d+(\.\d*)?|\.\d+)([eE][+-]?\d+)?$/;
 export function readShapes(text: string, file: string, origin: { readonly bundled: boolean }): ShapeList {
   const [header, ...rows] = readCsvRows(text, file);
   if (header === undefined) {
-    throw new InputError([{ file, problem: "the list is empty", allowed: `a header line with ${KNOWN_COLUMNS.join(", ")}` }]);
+    throw new InputError([{ file, problem: "the list is empty", allowed: `a header line with ${REQUIRED_COLUMNS.join(", ")}` }]);
   }
   const { places, remarks } = placeColumns(header, file);
   if (rows.length === 0) {
@@ -63,14 +64,14 @@ function placeColumns(header: CsvRow, file: string): { places: ReadonlyMap<strin
     if (name === "") return;
     if (places.has(name)) {
       issues.push({ file, line: header.line, field: name, problem: "this column stands twice", allowed: "each column once" });
-    } else if (!KNOWN_COLUMNS.includes(name as never)) {
+    } else if (!KNOWN_COLUMNS.includes(name)) {
       remarks.push(`${file}, line ${header.line}, ${name}: not one of our columns, left unread${didYouMean(name, KNOWN_COLUMNS)}`);
     }
     places.set(name, place);
   });
-  for (const name of KNOWN_COLUMNS) {
-    if (name !== YIELD_COLUMN.name && !places.has(name)) {
-      issues.push({ file, line: header.line, field: name, problem: "this column is missing", allowed: KNOWN_COLUMNS.join(", ") });
+  for (const name of REQUIRED_COLUMNS) {
+    if (!places.has(name)) {
+      issues.push({ file, line: header.line, field: name, problem: "this column is missing", allowed: REQUIRED_COLUMNS.join(", ") });
     }
   }
   if (issues.length > 0) throw new InputError(issues);
@@ -115,5 +116,12 @@ function readRow(
   }
   if (figures.webThicknessIn > figures.flangeWidthIn) fault("webThicknessIn", "the web is thicker than the flange is wide", "tw <= bf");
   if (figures.kDesignIn < figures.flangeThicknessIn) fault("kDesignIn", "k is less than the flange thickness", "k >= tf");
-  return { designation, ...figures, yieldStressKsi, source: { file, line: row.line }, bundled };
+  return { designation, ...figures, yieldStressKsi, stock: readStock(), source: { file, line: row.line }, bundled };
+
+  function readStock(): Stock | null {
+    const given = (name: string): boolean => cell(name) !== "";
+    if (!given(PLACE_COLUMN) && !STOCK_COLUMNS.some(({ name }) => given(name))) return null;
+    const numbers = Object.fromEntries(STOCK_COLUMNS.map(({ name, min, max }) => [name, given(name) ? number(name, min, max) : null]));
+    return { ...(numbers as unknown as Omit<Stock, "place">), place: given(PLACE_COLUMN) ? cell(PLACE_COLUMN) : null };
+  }
 }

@@ -46,11 +46,31 @@ export interface ShapeFigures {
   readonly webSlenderness: number;
 }
 
+/** What a yard says of its pieces of one shape; null wherever it says nothing. */
+export interface Stock {
+  /** Pieces on hand. */
+  readonly quantity: number | null;
+  /** Usable length of each piece, ft. */
+  readonly usableLengthFt: number | null;
+  /** Year in which the steel was built in, or rolled. */
+  readonly yearBuilt: number | null;
+  /** Price, in any money per lb. */
+  readonly pricePerLb: number | null;
+  /** Where it lies, or a note. */
+  readonly place: string | null;
+  /** Thickness lost from each flange, in. */
+  readonly flangeLossIn: number | null;
+  /** Thickness lost from the web, in. */
+  readonly webLossIn: number | null;
+}
+
 /** One shape of a list. */
 export interface Shape extends ShapeFigures {
   readonly designation: string;
   /** Yield stress the row itself gives, ksi; null when the list says nothing of it. */
   readonly yieldStressKsi: number | null;
+  /** What the row says of the pieces on hand; null when it says nothing. */
+  readonly stock: Stock | null;
   readonly source: ShapeSource;
   /** True for the open catalogue that comes with the program, false for somebody's own list. */
   readonly bundled: boolean;

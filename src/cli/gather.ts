@@ -50,7 +50,7 @@ export function gather(flags: Flags, needs: Needs): Gathered {
   const shapes = needs.shapes ? gatherShapes(flags, file, attempt, remarks) : [];
   if (needs.shape !== undefined && issues.length === 0) requireShape(needs.shape, shapes, issues);
   const layers = gatherLayers(flags, file, issues);
-  const question = attempt(() => ask(layers, needs.bridge, shapes, vehicles), null);
+  const question = attempt(() => ask(layers, needs.bridge, shapes, vehicles, needs.shape === undefined ? "limits" : "aside"), null);
   if (issues.length > 0 || question === null) throw new InputError(issues);
   return { question, remarks };
 }

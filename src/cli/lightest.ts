@@ -15,7 +15,7 @@ export async function runLightest(flags: Flags, io: Io): Promise<ExitCode> {
   for (const remark of remarks) io.stderr(`leanspan: ${remark}\n`);
   const prepared = prepare(question);
   const { bridge, layouts } = prepared;
-  const answer = lightest(prepared, flags.top ?? 5);
+  const answer = lightest(prepared, flags.top ?? 5, flags.price === true ? "cost" : "weight");
   await deliver(
     {
       text: () => lightestText(bridge, answer, layouts.inTheWay, io.style),

@@ -26,6 +26,7 @@ export interface Flags {
   readonly without?: string[];
   readonly set?: string[];
   readonly top?: number;
+  readonly price?: boolean;
   readonly json?: boolean;
   readonly csv?: string;
   readonly force?: boolean;
@@ -103,6 +104,11 @@ export function addOutputFlags(command: Command): Command {
     .option("--json", "the answer as JSON")
     .addOption(new Option("--csv <file>", "the answer's rows as CSV, into a file").argParser(once))
     .option("--force", "replace existing files");
+}
+
+/** Order by cost. */
+export function addPriceFlag(command: Command): Command {
+  return command.option("--price", "order by cost of the steel when every passing row has a price");
 }
 
 /** How many options are listed. */

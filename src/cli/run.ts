@@ -1,7 +1,7 @@
 import { Command, CommanderError } from "commander";
 import { InputError } from "../errors.js";
 import { EXIT, type ExitCode, type Io } from "./io.js";
-import { addBridgeFlags, addOutputFlags, addSectionFlags, addStringerFlags, addTopFlag, type Flags } from "./options.js";
+import { addBridgeFlags, addOutputFlags, addPriceFlag, addSectionFlags, addStringerFlags, addTopFlag, type Flags } from "./options.js";
 
 /**
  * Runs the command line: arguments to options to answer to exit code.
@@ -45,51 +45,43 @@ function build(io: Io, done: (code: ExitCode) => void): Command {
   const add = (name: string, description: string, lines: readonly string[]): Command =>
     program.command(name).description(description).addHelpText("after", examples(lines));
 
-  addOutputFlags(
-    addTopFlag(
-      addStringerFlags(
-        add("lightest", "the lightest options that pass every check", [
-          "lightest --span 60 --width 33",
-          `lightest --span "62'-6\\"" --width 30 --count 4 --fy 36 --top 3`,
-        ]),
-      ),
-    ),
-  ).action(async (flags: Flags) => done(await (await import("./lightest.js")).runLightest(flags, io)));
+  const lightest = add("lightest", "the lightest options that pass every check", [
+    "lightest --span 60 --width 33",
+    `lightest --span "62'-6\\"" --width 30 --count 4 --fy 36 --top 3`,
+  ]);
+  for (const flags of [addStringerFlags, addTopFlag, addPriceFlag, addOutputFlags]) flags(lightest);
+  lightest.action(async (flags: Flags) => done(await (await import("./lightest.js")).runLightest(flags, io)));
 
-  addOutputFlags(
-    addStringerFlags(
-      add("counts", "how many stringers across the deck", [
-        "counts --span 60 --width 33",
-        "counts --span 45 --width 28 --vehicle H20-44 --json",
-      ]),
-    ),
-  ).action(async (flags: Flags) => done(await (await import("./counts.js")).runCounts(flags, io)));
+  const counts = add("counts", "how many stringers across the deck", [
+    "counts --span 60 --width 33",
+    "counts --span 45 --width 28 --spec lfd --vehicle H20-44 --json",
+  ]);
+  for (const flags of [addStringerFlags, addOutputFlags]) flags(counts);
+  counts.action(async (flags: Flags) => done(await (await import("./counts.js")).runCounts(flags, io)));
 
-  addOutputFlags(
-    addStringerFlags(
-      add("check", "every number for one shape", [
-        "check W36X160 --span 60 --width 33 --count 4 --spacing 8.5",
-        "check W30X116 --span 40 --spacing 7",
-      ]).argument("<shape>", "designation of a shape of the list"),
-    ),
-  ).action(async (shape: string, flags: Flags) => done(await (await import("./check.js")).runCheck(shape, flags, io)));
+  const check = add("check", "every number for one shape", [
+    "check W36X160 --span 60 --width 33 --count 4 --spacing 8.5",
+    "check W30X116 --span 40 --spacing 7 --spec lfd --no-composite",
+  ]).argument("<shape>", "designation of a shape of the list");
+  for (const flags of [addStringerFlags, addOutputFlags]) flags(check);
+  check.action(async (shape: string, flags: Flags) => done(await (await import("./check.js")).runCheck(shape, flags, io)));
 
-  addOutputFlags(
-    addBridgeFlags(add("loads", "what a vehicle does to a simple span", ["loads --span 60", "loads --span 80 --vehicle HL-93 --json"])),
-  ).action(async (flags: Flags) => done(await (await import("./loads.js")).runLoads(flags, io)));
+  const loads = add("loads", "what a vehicle does to a simple span", ["loads --span 60", "loads --span 80 --vehicle HS20-44 --json"]);
+  for (const flags of [addBridgeFlags, addOutputFlags]) flags(loads);
+  loads.action(async (flags: Flags) => done(await (await import("./loads.js")).runLoads(flags, io)));
 
-  addOutputFlags(
-    addSectionFlags(
-      add("sections", "the shapes of the list in use", ["sections --shapes 'W30X*'", "sections --max-depth 24 --max-weight 100 --json"]),
-    ),
-  ).action(async (flags: Flags) => done(await (await import("./sections.js")).runSections(flags, io)));
+  const sections = add("sections", "the shapes of the list in use", [
+    "sections --shapes 'W30X*'",
+    "sections --max-depth 24 --max-weight 100 --json",
+  ]);
+  for (const flags of [addSectionFlags, addOutputFlags]) flags(sections);
+  sections.action(async (flags: Flags) => done(await (await import("./sections.js")).runSections(flags, io)));
 
-  addStringerFlags(
-    add("init", "a starting bridge file with every key", [
-      "init otter-creek.json --span 62 --width 30 --force",
-      "init forest-road.json --span 40 --width 16 --vehicle H15-44 --force",
-    ]).argument("<file>", "file to be written"),
-  )
+  const init = add("init", "a starting bridge file with every key", [
+    "init otter-creek.json --span 62 --width 30 --force",
+    "init forest-road.json --span 40 --width 16 --spec lfd --vehicle H15-44 --force",
+  ]).argument("<file>", "file to be written");
+  addStringerFlags(init)
     .option("--force", "replace an existing file")
     .action(async (file: string, flags: Flags) => done(await (await import("./init.js")).runInit(file, flags, io)));
 

@@ -6,6 +6,8 @@ export interface Ranked {
   readonly steel: Steel;
   readonly layout: Layout;
   readonly governingRatio: number;
+  /** What is ordered by first, per foot of bridge: steel weight, lb/ft, or cost. */
+  readonly measurePerFt: number;
 }
 
 /** Ratios that agree to this count as equal, so that the last binary digit never decides. */
@@ -17,7 +19,7 @@ export function steelPlfOf({ steel, layout }: Pick<Ranked, "steel" | "layout">):
 }
 
 /**
- * The total order of candidates: steel weight per foot of bridge, fewer stringers, smaller governing ratio, smaller overhang over
+ * The total order of candidates: steel weight per foot of bridge (by cost: cost, then weight), fewer stringers, smaller governing ratio, smaller overhang over
  * spacing, smaller spacing, name.
  *
  * @returns below zero when `a` comes first; zero only for the same candidate
@@ -25,6 +27,7 @@ export function steelPlfOf({ steel, layout }: Pick<Ranked, "steel" | "layout">):
  */
 export function byPreference(a: Ranked, b: Ranked): number {
   return (
+    a.measurePerFt - b.measurePerFt ||
     steelPlfOf(a) - steelPlfOf(b) ||
     (a.layout.count ?? 1) - (b.layout.count ?? 1) ||
     Math.round(a.governingRatio / EQUAL_RATIO) - Math.round(b.governingRatio / EQUAL_RATIO) ||

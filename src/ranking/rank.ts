@@ -1,5 +1,5 @@
 import type { Steel } from "../bridge/yield-stress.js";
-import { type Group, groupsByWeight, type SearchSpace, stands } from "../search/search.js";
+import { feasible, type Group, groupsOf, type SearchSpace } from "../search/search.js";
 import type { Assessor } from "../specs/contract.js";
 import { byPreference, type Ranked } from "./order.js";
 
@@ -13,7 +13,7 @@ export interface Option extends Ranked {
 /**
  * The best options that pass, at most one per count and shape, in the total order.
  *
- * Groups are pulled by rising steel weight and count, the first two keys of the order; once enough options stand after a whole group,
+ * Groups are pulled by rising measure, and of equal ones by count; once enough options stand after a whole group,
  * no candidate left can come before them, so nothing skipped can change the answer.
  *
  * @param space layouts and shapes
@@ -21,7 +21,7 @@ export interface Option extends Ranked {
  */
 export function rank(space: SearchSpace, top: number): readonly Option[] {
   const options: Option[] = [];
-  for (const group of groupsByWeight(space)) {
+  for (const group of groupsOf(space)) {
     if (options.length >= top) break;
     options.push(...passingOf(group).sort(byPreference));
   }
@@ -30,26 +30,26 @@ export function rank(space: SearchSpace, top: number): readonly Option[] {
 
 function passingOf(group: Group): Option[] {
   return group.steels.flatMap((steel) => {
-    const option = bestLayout(group.assessors, steel);
+    const option = bestLayout(group, steel);
     return option === null ? [] : [option];
   });
 }
 
 /** The best layout of one count that a shape passes on, or null. */
-export function bestLayout(assessors: readonly Assessor[], steel: Steel): Option | null {
+function bestLayout({ assessors, measurePerFt }: Group, steel: Steel): Option | null {
   let best: Option | null = null;
   for (let index = 0; index < assessors.length; index++) {
     const assessor = assessors[index];
     if (!passesOn(assessor, steel)) continue;
     const { layout, governingRatio } = assessor;
-    const option = { steel, layout, governingRatio, assessor, spacingRangeFt: [layout.spacingFt, layout.spacingFt] as const };
+    const option = { steel, layout, governingRatio, measurePerFt, assessor, spacingRangeFt: [layout.spacingFt, layout.spacingFt] as const };
     if (best === null || byPreference(option, best) < 0) best = option;
   }
   return best === null ? null : { ...best, spacingRangeFt: passingRange(assessors, best) };
 }
 
 function passesOn(assessor: Assessor, steel: Steel): boolean {
-  return stands(assessor.layout, steel) && assessor.screen(steel);
+  return feasible(assessor.layout, steel) && assessor.screen(steel);
 }
 
 /** Least and greatest of the neighbouring spacings at which the option's shape passes. */
@@ -62,15 +62,16 @@ function passingRange(assessors: readonly Assessor[], { assessor, steel }: Optio
 }
 
 /** The candidate nearest to passing: the smallest governing ratio, then the total order; null when no shape stands under the deck. */
-export function nearestMiss({ assessors, steels }: SearchSpace): { readonly steel: Steel; readonly assessor: Assessor } | null {
+export function nearestMiss({ assessors, steels, measure }: SearchSpace): { readonly steel: Steel; readonly assessor: Assessor } | null {
   let nearest: (Ranked & { readonly assessor: Assessor }) | null = null;
   for (const assessor of assessors) {
     for (const steel of steels) {
-      if (!stands(assessor.layout, steel)) continue;
+      if (!feasible(assessor.layout, steel)) continue;
       assessor.assess(steel, null);
       const ratio = assessor.governingRatio;
       if (nearest !== null && ratio > nearest.governingRatio) continue;
-      const ranked = { steel, layout: assessor.layout, governingRatio: ratio, assessor };
+      const measurePerFt = measure(steel.shape) * (assessor.layout.count ?? 1);
+      const ranked = { steel, layout: assessor.layout, governingRatio: ratio, measurePerFt, assessor };
       if (nearest === null || ratio < nearest.governingRatio || byPreference(ranked, nearest) < 0) nearest = ranked;
     }
   }

@@ -46,7 +46,12 @@ export function loadRows(tenthPoints: readonly SectionEffects[]): CsvRecord[] {
 
 /** One row a shape, in our own columns, so that the file can be read again as a list. */
 export function sectionRows(shapes: readonly Shape[]): CsvRecord[] {
-  return shapes.map(({ designation, source: _, bundled: __, yieldStressKsi, ...figures }) => ({ designation, ...figures, yieldStressKsi }));
+  return shapes.map(({ designation, source: _, bundled: __, yieldStressKsi, stock, ...figures }) => ({
+    designation,
+    ...figures,
+    yieldStressKsi,
+    ...stock,
+  }));
 }
 
 function assessmentRow(assessment: Assessment): CsvRecord {

@@ -29,7 +29,7 @@ export function assumptionText({ key, value }: Pick<RestsOn, "key" | "value">): 
     case "steel.grade":
       return `grade ${value} steel`;
     case "liveLoad.adtt":
-      return value === null ? "truck traffic not given, taken as 2,500 a day or more" : `${shown(Number(value))} trucks a day`;
+      return value === null ? "truck traffic not given, taken as heavy" : `${shown(Number(value))} trucks a day`;
     case "bracing.topFlange":
       return flangeText(value);
     case "deflection.use":
@@ -60,7 +60,7 @@ export function flippedText({ key, flippedTo }: Pick<RestsOn, "key" | "flippedTo
 const flangeText = (value: unknown): string => (value === "held" ? "the top flange held" : "the top flange braced by diaphragms alone");
 
 /** What comes of flipping an assumption, a sentence. */
-export function restsOnText(found: RestsOn): string {
+export function restsOnText(found: RestsOn, rankedBy: "weight" | "cost"): string {
   const { assessment, instead, outcome, lanes } = found;
   const because = lanes === null ? "" : ` the roadway carries ${lanes} lane${lanes === 1 ? "" : "s"}:`;
   const what = `With ${flippedText(found)} (now ${assumptionText(found)})${because}`;
@@ -69,6 +69,7 @@ export function restsOnText(found: RestsOn): string {
     const then = instead === null ? "nothing passes then" : `first is then ${at(instead)} at ${ratioText(instead.governing.ratio)}`;
     return `${what} ${assessment.shape} fails: ${failingText(assessment)}; ${then}.`;
   }
-  const lighter = outcome === "passes lighter" ? "a lighter option passes" : "another shape is first";
+  const lighter =
+    outcome === "passes lighter" ? `a ${rankedBy === "cost" ? "cheaper" : "lighter"} option passes` : "another shape is first";
   return `${what} ${lighter}: ${at(assessment)} at ${ratioText(assessment.governing.ratio)}.`;
 }

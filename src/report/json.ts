@@ -2,6 +2,7 @@ import type { Assessment } from "../answers/assessment.js";
 import type { CheckAnswer } from "../answers/check.js";
 import type { CountsAnswer } from "../answers/counts.js";
 import type { LightestAnswer } from "../answers/lightest.js";
+import type { LeftOut } from "../answers/stock.js";
 import type { WhyNotLighter } from "../answers/why-not-lighter.js";
 import type { Bridge, BridgeValues } from "../bridge/bridge.js";
 import type { Shape } from "../catalogue/shape.js";
@@ -11,6 +12,7 @@ import { assumptionsOf, loadsAssumptions } from "./assumptions.js";
 import { byHandLines } from "./by-hand.js";
 import { CAUTION } from "./caution.js";
 import { assumptionText, changeText, flippedText, restsOnText } from "./explanations.js";
+import { leftOutText } from "./left-out.js";
 import { advisoryLines } from "./text/assessment-lines.js";
 import { noteText } from "./text/check.js";
 import { countReason } from "./text/counts.js";
@@ -43,6 +45,9 @@ export function lightestJson(bridge: Bridge, answer: LightestAnswer, inTheWay: I
   return {
     ...frame("lightest", bridge, assumptionsOf(bridge)),
     examined: answer.examined,
+    rankedBy: answer.rankedBy,
+    withoutPrice: answer.withoutPrice,
+    leftOut: answer.leftOut.map(leftOutJson),
     noLayout: inTheWay.length === 0 ? null : inTheWay,
     options: answer.options.map(({ rank, spacingRangeFt, assessment }) => ({
       rank,
@@ -68,11 +73,13 @@ export function lightestJson(bridge: Bridge, answer: LightestAnswer, inTheWay: I
       instead: found.instead === null ? null : assessmentJson(found.instead),
       key: found.key,
       value: found.flippedTo,
-      sentence: restsOnText(found),
+      sentence: restsOnText(found, answer.rankedBy),
     })),
     byHand: answer.byHand === null ? [] : byHandLines(bridge, answer.byHand.assessment, answer.byHand.figures),
   };
 }
+
+const leftOutJson = (one: LeftOut): unknown => ({ ...one, reason: leftOutText(one) });
 
 function rescueJson({ rescue }: WhyNotLighter): unknown {
   if (rescue === null) return null;
@@ -85,6 +92,7 @@ export function countsJson(bridge: Bridge, answer: CountsAnswer, inTheWay: InThe
   return {
     ...frame("counts", bridge, assumptionsOf(bridge)),
     examined: answer.examined,
+    leftOut: answer.leftOut.map(leftOutJson),
     noLayout: inTheWay.length === 0 ? null : inTheWay,
     counts: answer.counts.map((row) => ({
       count: row.count,

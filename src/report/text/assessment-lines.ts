@@ -21,6 +21,29 @@ export function shortGoverning({ governing }: Assessment): string {
   return `${governing.position.slice(0, 3)} ${id} ${ratioText(governing.ratio)}`;
 }
 
+/** What is said of the pieces on hand and of old steel: a sentence each. */
+export function stockLines({ shape, stock, fyKsi, fySource }: Assessment): string[] {
+  const lines: string[] = [];
+  if (fySource === "year built" && stock !== null) {
+    lines.push(
+      `${shape}: Fy ${shown(fyKsi)} ksi by the year built, ${stock.yearBuilt} (steel of unknown make, values from memory); test a coupon.`,
+    );
+  }
+  const [flange, web] = [stock?.flangeLossIn ?? 0, stock?.webLossIn ?? 0];
+  if (flange > 0 || web > 0) {
+    lines.push(
+      `${shape}: checked with ${shown(flange)} in off the outer face of each flange and ${shown(web)} in off the web; properties recomputed from what is left, the weight kept.`,
+    );
+  }
+  const hand = [
+    stock?.quantity == null ? "" : `${stock.quantity} pieces`,
+    stock?.usableLengthFt == null ? "" : `${feetText(stock.usableLengthFt)} ft long`,
+    stock?.place == null ? "" : stock.place,
+  ].filter((part) => part !== "");
+  if (hand.length > 0) lines.push(`${shape} on hand: ${hand.join(", ")}.`);
+  return lines;
+}
+
 /** Required checks that an assessment fails: "flexure 1.08, overload 1.02", the worse position of each. */
 export function failingText(assessment: Assessment): string {
   const worst = new Map<string, number>();

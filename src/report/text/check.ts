@@ -3,7 +3,7 @@ import type { Bridge } from "../../bridge/bridge.js";
 import type { Effects, Note, StringerAssessment, StudCount } from "../../specs/contract.js";
 import { assumptionsOf } from "../assumptions.js";
 import { feetText, ratioText, shown } from "../numbers.js";
-import { checkTable, governingText, layoutText, stepLines } from "./assessment-lines.js";
+import { checkTable, governingText, layoutText, stepLines, stockLines } from "./assessment-lines.js";
 import { bridgeLines, closing, firstLine, type Style, WIDTH } from "./frame.js";
 import { wrap } from "./table.js";
 
@@ -19,6 +19,7 @@ export function checkText(bridge: Bridge, { assessment, layoutsTried }: CheckAns
     `${assessment.shape} (${source.file}, line ${source.line}), Fy ${shown(assessment.fyKsi)} ksi, ${layoutText(assessment)} ft${overhang}: ${verdict}`,
     `Governing: ${governingText(assessment)}, ratio ${ratioText(assessment.governing.ratio)}`,
   ];
+  lines.push(...stockLines(assessment).flatMap((sentence) => wrap(sentence, WIDTH, "")));
   if (layoutsTried > 1) {
     lines.push(`${layoutsTried} layouts tried; the one shown ${assessment.passes ? "ranks first" : "has the smallest governing ratio"}.`);
   }

@@ -4,7 +4,7 @@ import { assumptionsOf } from "../assumptions.js";
 import { feetText, shown } from "../numbers.js";
 import { failingText, shortGoverning } from "./assessment-lines.js";
 import { bridgeLines, closing, firstLine, type Style, WIDTH } from "./frame.js";
-import { type InTheWay, noLayoutLines } from "./lightest.js";
+import { type InTheWay, leftOutLines, noLayoutLines } from "./lightest.js";
 import { table, wrap } from "./table.js";
 
 /** Why no shape passes at a count, in words; null when one does. */
@@ -20,6 +20,7 @@ export function countsText(bridge: Bridge, answer: CountsAnswer, inTheWay: InThe
   const lines = [style.strong(firstLine(bridge)), ...bridgeLines(bridge), ""];
   if (inTheWay.length > 0) lines.push(...noLayoutLines(inTheWay, style));
   else lines.push(...countTable(answer), ...reasons(answer, style), ...marks(answer));
+  lines.push(...leftOutLines(answer.leftOut));
   lines.push("", `Examined: ${layouts} layouts x ${shapes} shapes = ${candidates} candidates.`);
   return [...lines, ...closing(assumptionsOf(bridge)), ""].join("\n");
 }

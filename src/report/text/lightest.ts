@@ -1,15 +1,20 @@
 import type { Assessment } from "../../answers/assessment.js";
 import type { DepthRow } from "../../answers/by-depth.js";
 import type { LightestAnswer } from "../../answers/lightest.js";
+import type { LeftOut } from "../../answers/stock.js";
 import type { WhyNotLighter } from "../../answers/why-not-lighter.js";
 import type { Bridge } from "../../bridge/bridge.js";
 import { assumptionsOf } from "../assumptions.js";
 import { byHandLines } from "../by-hand.js";
 import { changeText, restsOnText } from "../explanations.js";
+import { leftOutText } from "../left-out.js";
 import { feetText, ratioText, shown } from "../numbers.js";
-import { advisoryLines, failingText, governingText, layoutText, shortGoverning } from "./assessment-lines.js";
+import { advisoryLines, failingText, governingText, layoutText, shortGoverning, stockLines } from "./assessment-lines.js";
 import { bridgeLines, bullet, closing, firstLine, type Style, WIDTH } from "./frame.js";
 import { table, wrap } from "./table.js";
+
+/** Shapes left out that are named one by one. */
+const LEFT_OUT_SHOWN = 8;
 
 /** Limits that leave no layout, as data of `layoutsOf`. */
 export type InTheWay = readonly { readonly key: string; readonly limit: number; readonly trials: number }[];
@@ -19,16 +24,18 @@ export function lightestText(bridge: Bridge, answer: LightestAnswer, inTheWay: I
   const { layouts, shapes, candidates } = answer.examined;
   const lines = [style.strong(firstLine(bridge)), ...bridgeLines(bridge), ""];
   if (answer.options.length === 0) lines.push(...nothing(answer.nearestMiss, inTheWay, style));
-  else lines.push(...optionTable(answer), ...remarks(answer.options[0].assessment));
-  if (answer.whyNotLighter !== null) lines.push("", ...whyNotLighterLines(answer.whyNotLighter, style));
-  if (answer.byDepth.length > 0) lines.push("", style.strong("Lightest by depth"), ...depthTable(answer.byDepth));
+  else lines.push(...optionTable(answer), ...orderLines(answer), ...ofStock(answer), ...remarks(answer.options[0].assessment));
+  if (answer.whyNotLighter !== null) lines.push("", ...whyNotLighterLines(answer.whyNotLighter, answer.rankedBy, style));
+  if (answer.byDepth.length > 0)
+    lines.push("", style.strong(answer.rankedBy === "cost" ? "Cheapest by depth" : "Lightest by depth"), ...depthTable(answer.byDepth));
   if (answer.restsOn.length > 0) {
-    lines.push("", style.strong("Rests on"), ...answer.restsOn.flatMap((found) => bullet(restsOnText(found))));
+    lines.push("", style.strong("Rests on"), ...answer.restsOn.flatMap((found) => bullet(restsOnText(found, answer.rankedBy))));
   }
   if (answer.byHand !== null) {
     const { assessment, figures } = answer.byHand;
     lines.push("", style.strong("By hand"), ...byHandLines(bridge, assessment, figures).flatMap(bullet));
   }
+  lines.push(...leftOutLines(answer.leftOut));
   lines.push("", `Examined: ${layouts} layouts x ${shapes} shapes = ${candidates} candidates.`);
   return [...lines, ...closing(assumptionsOf(bridge)), ""].join("\n");
 }
@@ -99,6 +106,29 @@ function nothing(nearest: Assessment | null, inTheWay: InTheWay, style: Style): 
   ];
 }
 
+/** Shapes of the list that are not offered: how many, and the first of them with their reasons. */
+export function leftOutLines(leftOut: readonly LeftOut[]): string[] {
+  if (leftOut.length === 0) return [];
+  const first = leftOut.slice(0, LEFT_OUT_SHOWN).map((one) => `  ${one.shape} (line ${one.line}): ${leftOutText(one)}`);
+  const more = leftOut.length > LEFT_OUT_SHOWN ? [`  and ${leftOut.length - LEFT_OUT_SHOWN} more (all in --json)`] : [];
+  return ["", `Left out of the list: ${leftOut.length}`, ...first, ...more];
+}
+
+/** What the list says of the shapes shown, each once. */
+function ofStock({ options }: LightestAnswer): string[] {
+  const sentences = new Set(options.flatMap(({ assessment }) => stockLines(assessment)));
+  return [...sentences].flatMap((sentence) => wrap(sentence, WIDTH, ""));
+}
+
+function orderLines({ rankedBy, withoutPrice, options }: LightestAnswer): string[] {
+  if (rankedBy === "cost") {
+    const costs = options.map(({ rank, assessment }) => `${rank}: ${shown(assessment.costPerFtOfBridge ?? 0)}`);
+    return wrap(`Ranked by cost of the steel per ft of bridge: ${costs.join(", ")}.`, WIDTH, "");
+  }
+  if (withoutPrice.length === 0) return [];
+  return wrap(`Ranked by weight, for these that pass have no price: ${withoutPrice.slice(0, LEFT_OUT_SHOWN).join(", ")}.`, WIDTH, "");
+}
+
 function depthTable(rows: readonly DepthRow[]): string[] {
   return table(
     [
@@ -126,13 +156,14 @@ export function noLayoutLines(inTheWay: InTheWay, style: Style): string[] {
   return [style.bad("No layout fits this deck."), ...wrap(`In the way: ${what.join("; ")}.`, WIDTH, "")];
 }
 
-function whyNotLighterLines(why: WhyNotLighter, style: Style): string[] {
-  const lines = [style.strong("Why not lighter")];
-  if (why.lighterShapes === 0) return [...lines, "No shape of the list is lighter."];
+function whyNotLighterLines(why: WhyNotLighter, rankedBy: "weight" | "cost", style: Style): string[] {
+  const less = rankedBy === "cost" ? "cheaper" : "lighter";
+  const lines = [style.strong(`Why not ${less}`)];
+  if (why.lighterShapes === 0) return [...lines, `No shape of the list is ${less}.`];
   const failing = Object.entries(why.failing)
     .sort((a, b) => b[1] - a[1])
     .map(([id, count]) => `${count} in ${id}`);
-  lines.push(...wrap(`On the first layout ${why.lighterShapes} shapes are lighter and fail: ${failing.join(", ")}. Nearest:`, WIDTH, ""));
+  lines.push(...wrap(`On the first layout ${why.lighterShapes} shapes are ${less} and fail: ${failing.join(", ")}. Nearest:`, WIDTH, ""));
   lines.push(
     ...table(
       [
@@ -142,16 +173,16 @@ function whyNotLighterLines(why: WhyNotLighter, style: Style): string[] {
       ],
       why.nearest.map((assessment) => [`  ${assessment.shape}`, shown(assessment.weightPlf), failingText(assessment)]),
     ),
-    ...rescueLines(why),
+    ...rescueLines(why, less),
   );
   return lines;
 }
 
-function rescueLines({ rescue, nearest }: WhyNotLighter): string[] {
+function rescueLines({ rescue, nearest }: WhyNotLighter, word: string): string[] {
   if (rescue === null) return wrap(`No single change lets ${nearest[0]?.shape ?? "one"} pass.`, WIDTH, "");
   const { assessment, change, lighterThanAnswer } = rescue;
   const weight = shown(assessment.steelPlfOfBridge ?? assessment.weightPlf);
-  const less = lighterThanAnswer ? "lighter than the answer" : "not lighter than the answer";
+  const less = `${lighterThanAnswer ? "" : "not "}${word} than the answer`;
   return wrap(
     `${assessment.shape} would pass with ${changeText(change)}: ${shortGoverning(assessment)}, steel ${weight} lb/ft of bridge, ${less}.`,
     WIDTH,

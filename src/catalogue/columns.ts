@@ -38,12 +38,12 @@ export const YIELD_COLUMN = { name: "yieldStressKsi", min: 20, max: 70 } as cons
 
 /** Optional numeric columns of a yard's own list. */
 export const STOCK_COLUMNS = [
-  { name: "yearBuilt", min: 1850, max: 2100 },
-  { name: "quantity", min: 0, max: 1000000 },
-  { name: "usableLengthFt", min: 1, max: 400 },
-  { name: "pricePerLb", min: 0.0001, max: 1000 },
-  { name: "flangeLossIn", min: 0, max: 5 },
-  { name: "webLossIn", min: 0, max: 5 },
+  { name: "yearBuilt", min: 1850, max: 2100, whole: true },
+  { name: "quantity", min: 0, max: 1000000, whole: true },
+  { name: "usableLengthFt", min: 1, max: 400, whole: false },
+  { name: "pricePerLb", min: 0.0001, max: 1000, whole: false },
+  { name: "flangeLossIn", min: 0, max: 5, whole: false },
+  { name: "webLossIn", min: 0, max: 5, whole: false },
 ] as const;
 /** Optional text column: where the pieces lie, or a note. */
 export const PLACE_COLUMN = "place";

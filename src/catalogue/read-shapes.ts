@@ -122,6 +122,9 @@ function readRow(
     const given = (name: string): boolean => cell(name) !== "";
     if (!given(PLACE_COLUMN) && !STOCK_COLUMNS.some(({ name }) => given(name))) return null;
     const numbers = Object.fromEntries(STOCK_COLUMNS.map(({ name, min, max }) => [name, given(name) ? number(name, min, max) : null]));
+    for (const { name, whole } of STOCK_COLUMNS) {
+      if (whole && given(name) && !Number.isInteger(Number(cell(name)))) fault(name, `"${cell(name)}"`, "a whole number");
+    }
     return { ...(numbers as unknown as Omit<Stock, "place">), place: given(PLACE_COLUMN) ? cell(PLACE_COLUMN) : null };
   }
 }

@@ -117,6 +117,7 @@ class Draft {
   readonly #layers: ReadonlyMap<string, Layer>;
   readonly #at: (key: string) => Pick<InputIssue, "file" | "field">;
   readonly #issues: InputIssue[];
+  #knownVehicles: readonly string[] = [];
   #togetherVehicles: readonly string[] = [];
 
   constructor(merged: Merged, at: (key: string) => Pick<InputIssue, "file" | "field">, issues: InputIssue[]) {
@@ -170,7 +171,7 @@ class Draft {
     if (this.#number("deck.maxSpacingFt") === null) {
       const most = greatestSpacingFt(kind, thickness);
       if (most !== null) this.#values.set("deck.maxSpacingFt", most);
-      else if (!this.#spoiled("deck.thicknessIn", "deck.maxSpacingFt")) {
+      else if (!byThickness(kind) && !this.#spoiled("deck.maxSpacingFt")) {
         this.#fault("deck.maxSpacingFt", `a ${kind} deck needs its greatest stringer spacing`, "a length in feet from the deck's maker");
       }
     }
@@ -229,6 +230,7 @@ class Draft {
   }
 
   settleVehicle(vehicles: ResolveOptions["vehicles"]): void {
+    this.#knownVehicles = vehicles.map(({ name }) => name);
     this.#togetherVehicles = vehicles.filter(({ dynamicAllowance }) => dynamicAllowance !== null).map(({ name }) => name);
     const asked = this.#values.get("liveLoad.vehicle") as string | null | undefined;
     if (asked === null || asked === undefined) {
@@ -257,8 +259,9 @@ class Draft {
   #settleVehicleOfSpecification(): void {
     const vehicle = this.#values.get("liveLoad.vehicle") as string;
     const together = this.#togetherVehicles.includes(vehicle);
+    if (!this.#knownVehicles.includes(vehicle)) return;
     if (this.#values.get("specification") === "lrfd" && !together) {
-      this.#fault("liveLoad.vehicle", `${vehicle} is not a live load of lrfd`, this.#togetherVehicles.join(", "));
+      this.#fault("liveLoad.vehicle", `${vehicle} is not a live load of lrfd`, `${this.#togetherVehicles.join(", ")}, or --spec lfd`);
     }
     if (this.#values.get("specification") !== "lrfd" && together) {
       this.#fault(
@@ -340,6 +343,9 @@ function greatestSpacingFt(kind: DeckKind, thicknessIn: number | null): number |
   if (thicknessIn === null || kind === "steel-grid" || kind === "corrugated-steel") return null;
   return kind === "timber-plank" ? thicknessIn : (30 * thicknessIn) / 12 - 10;
 }
+
+/** Whether a deck's greatest spacing follows from its thickness. */
+const byThickness = (kind: DeckKind): boolean => kind === "concrete" || kind === "timber-plank";
 
 /** Unit weight of a deck of solid material, lb/ft3; null where thickness alone does not tell the weight. */
 export function deckUnitWeightPcf(kind: DeckKind): number | null {

@@ -1,3 +1,4 @@
+import { requirePositive } from "../errors.js";
 import {
   type AxleTrain,
   type EndPlace,
@@ -93,6 +94,7 @@ export function laneEffects(vehicle: Vehicle, spanFt: number): LaneEffects {
  * Source: as `laneEffects`.
  */
 export function tenthPoints(vehicle: Vehicle, spanFt: number): readonly SectionEffects[] {
+  requirePositive("spanFt", spanFt);
   return Array.from({ length: 11 }, (_, tenth) => {
     const xFt = (spanFt * tenth) / 10;
     const effects = sectionEffectsByName(vehicle, spanFt, xFt);

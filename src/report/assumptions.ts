@@ -100,7 +100,7 @@ function distributionText({ specification, deck }: Bridge): string {
   const rule =
     deck.kind === "concrete"
       ? "the formulas of 4.6.2.2, the lever rule beyond their range, the rigid section as a minimum of exterior stringers"
-      : "Table 4.6.2.2.2a-1, the lever rule beyond it and for exterior stringers";
+      : "the larger column of Table 4.6.2.2.2a-1, the lever rule beyond it and for exterior stringers";
   return `Live load to each stringer in lanes by ${rule}; ${trucks}.`;
 }
 
@@ -137,7 +137,7 @@ function lrfdAssumptions(bridge: Bridge): string[] {
     const brackets =
       bridge.pour.lateralBendingKsi === 0
         ? "overhang brackets not covered"
-        : `${shown(bridge.pour.lateralBendingKsi)} ksi of factored lateral bending as given`;
+        : `${shown(bridge.pour.lateralBendingKsi)} ksi of lateral bending as given, factored and amplified`;
     list.push(
       `Deck pour: the worse of 1.25 dead + 1.5 construction and 1.4 of both, ${shown(bridge.pour.constructionPsf)} lb/ft2, on the bare shape; ${brackets}.`,
     );

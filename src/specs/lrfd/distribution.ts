@@ -322,13 +322,18 @@ function otherDeck(
   const row = OTHER_DECKS.find(({ kind, fromIn, belowIn }) => kind === bridge.deck.kind && thickness >= fromIn && thickness < belowIn);
   const byLever = { moment: lever, shear: lever, fatigue: leverFatigue, rule: "lever rule" };
   if (position === "exterior" || row === undefined) return byLever;
-  const column = lanes >= 2 ? row.moreLanes : row.oneLane;
-  const one = S > row.oneLane.toFt ? leverOne : spacingOverDivisor.of(S, row.oneLane.divisor);
-  const fatigue = S > row.oneLane.toFt ? leverFatigue : one / ONE_LANE_PRESENCE;
-  if (S > column.toFt) return { ...byLever, fatigue };
-  const moment = spacingOverDivisor.of(S, column.divisor);
-  recorder?.step(spacingOverDivisor, moment, S, column.divisor);
-  return { moment, shear: row.shearAlike ? moment : lever, fatigue, rule: `S/${column.divisor}` };
+  const byColumn = ({ divisor, toFt }: OtherDeckRow["oneLane"], beyond: number, symbol: string): { factor: number; rule: string } => {
+    if (S > toFt) return { factor: beyond, rule: "lever rule" };
+    const factor = spacingOverDivisor.of(S, divisor);
+    recorder?.step({ ...spacingOverDivisor, symbol }, factor, S, divisor);
+    return { factor, rule: `S/${divisor}` };
+  };
+  const one = byColumn(row.oneLane, leverOne, "g1");
+  const more = lanes >= 2 ? byColumn(row.moreLanes, lever, "g2") : one;
+  // One loaded lane remains a case on a wider bridge, so the larger column governs, as under concrete.
+  const moment = more.factor >= one.factor ? more : one;
+  const fatigue = S > row.oneLane.toFt ? leverFatigue : one.factor / ONE_LANE_PRESENCE;
+  return { moment: moment.factor, shear: row.shearAlike ? moment.factor : lever, fatigue, rule: moment.rule };
 }
 
 /**
@@ -352,16 +357,16 @@ export function lrfdFactors(share: LrfdShare, shape: ShapeFigures, n: number, ou
   }
   const { place } = share;
   const { slabIn: ts, haunchIn: th, spanFt: L } = place;
-  const Kg = ts === null ? 0 : stiffness.of(n, shape.inertiaXIn4, shape.areaIn2, shape.depthIn, th, ts);
-  if (!share.inRange || ts === null || !within(Kg, RANGES.stiffnessIn4)) {
-    byLeverRule(share, out);
-    return;
-  }
+  byLeverRule(share, out);
+  if (!share.inRange || ts === null) return;
+  shearByFormula(share, out, recorder);
+  const Kg = stiffness.of(n, shape.inertiaXIn4, shape.areaIn2, shape.depthIn, th, ts);
   recorder?.step(stiffness, Kg, n, shape.inertiaXIn4, shape.areaIn2, shape.depthIn, th, ts);
+  if (!within(Kg, RANGES.stiffnessIn4)) return;
   const k = stiffnessTerm.of(Kg, L, ts);
   recorder?.step(stiffnessTerm, k, Kg, L, ts);
-  if (place.position === "interior") interior(share, k, out, recorder);
-  else exterior(share, k, out, recorder);
+  if (place.position === "interior") interiorMoment(share, k, out, recorder);
+  else exteriorMomentOf(share, k, out, recorder);
 }
 
 function fill(out: LrfdFactors, moment: number, shear: number, fatigue: number, momentRule: string, shearRule: string): void {
@@ -378,70 +383,84 @@ function byLeverRule(share: LrfdShare, out: LrfdFactors): void {
   fill(out, all, all, Math.max(share.leverFatigue, share.rigidOne), rule, rule);
 }
 
-function interior(
+/** Shear has no range of Kg. Source: AASHTO LRFD, 9th ed., Tables 4.6.2.2.3a-1, 4.6.2.2.3b-1; Art. 4.6.2.2.2d for the rigid section. */
+function shearByFormula({ place, lever, leverOne, rigid }: LrfdShare, out: LrfdFactors, recorder: Recorder | null): void {
+  const { position, spacingFt: S, lanes, count, curbInsideFt } = place;
+  if (count === FEW_STRINGERS) {
+    out.shear = lever;
+    out.shearRule = "lever rule (three stringers)";
+  } else if (position === "interior") {
+    out.shear = shearOneLane.of(S);
+    out.shearRule = "formula";
+    recorder?.step(shearOneLane, out.shear, S);
+  } else {
+    out.shear = leverOne;
+    out.shearRule = "lever rule, one truck";
+  }
+  if (lanes >= 2 && count !== FEW_STRINGERS) {
+    const more = shearMoreLanes.of(S);
+    recorder?.step(shearMoreLanes, more, S);
+    if (position === "interior") out.shear = Math.max(out.shear, more);
+    else {
+      const de = curbInsideFt ?? 0;
+      const gve = exteriorShear.of(de, more);
+      recorder?.step(exteriorShear, gve, de, more);
+      if (gve > out.shear) {
+        out.shear = gve;
+        out.shearRule = "(0.60 + de/10) times the formula";
+      }
+    }
+  }
+  if (rigid > out.shear) {
+    out.shear = rigid;
+    out.shearRule = "rigid section";
+  }
+}
+
+function interiorMoment(
   { place, lever, leverFatigue, termOne, termMore }: LrfdShare,
   k: number,
   out: LrfdFactors,
   recorder: Recorder | null,
 ): void {
-  const { spacingFt: S, lanes, count } = place;
+  const { lanes, count } = place;
   const one = momentOneLane.of(termOne, k);
   recorder?.step(momentOneLane, one, termOne, k);
-  let moment = one;
-  let shear = shearOneLane.of(S);
-  recorder?.step(shearOneLane, shear, S);
+  out.moment = one;
+  out.fatigue = one / ONE_LANE_PRESENCE;
+  out.momentRule = "formula";
   if (lanes >= 2) {
     const more = momentMoreLanes.of(termMore, k);
     recorder?.step(momentMoreLanes, more, termMore, k);
-    moment = Math.max(one, more);
-    const moreShear = shearMoreLanes.of(S);
-    recorder?.step(shearMoreLanes, moreShear, S);
-    shear = Math.max(shear, moreShear);
+    out.moment = Math.max(one, more);
   }
-  const fatigue = one / ONE_LANE_PRESENCE;
-  if (count === FEW_STRINGERS) {
-    const rule = lever < moment ? "lever rule (three stringers)" : "formula (three stringers)";
-    fill(out, Math.min(moment, lever), lever, Math.min(fatigue, leverFatigue), rule, "lever rule (three stringers)");
-  } else fill(out, moment, shear, fatigue, "formula", "formula");
+  if (count !== FEW_STRINGERS) return;
+  out.momentRule = lever < out.moment ? "lever rule (three stringers)" : "formula (three stringers)";
+  out.moment = Math.min(out.moment, lever);
+  out.fatigue = Math.min(out.fatigue, leverFatigue);
 }
 
-function exterior(share: LrfdShare, k: number, out: LrfdFactors, recorder: Recorder | null): void {
+function exteriorMomentOf(share: LrfdShare, k: number, out: LrfdFactors, recorder: Recorder | null): void {
   const { place, lever, leverOne, leverFatigue, rigid, rigidOne, termMore } = share;
-  const { spacingFt: S, lanes, count, curbInsideFt } = place;
-  const de = curbInsideFt ?? 0;
-  const few = count === FEW_STRINGERS;
-  let moment = leverOne;
-  let shear = few ? lever : leverOne;
-  let momentRule = "lever rule, one truck";
-  let shearRule = few ? "lever rule (three stringers)" : "lever rule, one truck";
+  const { lanes, count, curbInsideFt } = place;
+  out.moment = leverOne;
+  out.momentRule = "lever rule, one truck";
+  out.fatigue = Math.max(leverFatigue, rigidOne);
   if (lanes >= 2) {
+    const de = curbInsideFt ?? 0;
     const more = momentMoreLanes.of(termMore, k);
     recorder?.step(momentMoreLanes, more, termMore, k);
     const ge = exteriorMoment.of(de, more);
     recorder?.step(exteriorMoment, ge, de, more);
-    const several = few ? Math.min(ge, lever) : ge;
-    if (several > moment) {
-      moment = several;
-      momentRule = few && lever < ge ? "lever rule (three stringers)" : "(0.77 + de/9.1) times the formula";
-    }
-    if (!few) {
-      const moreShear = shearMoreLanes.of(S);
-      recorder?.step(shearMoreLanes, moreShear, S);
-      const gve = exteriorShear.of(de, moreShear);
-      recorder?.step(exteriorShear, gve, de, moreShear);
-      if (gve > shear) {
-        shear = gve;
-        shearRule = "(0.60 + de/10) times the formula";
-      }
+    const few = count === FEW_STRINGERS && lever < ge;
+    const several = few ? lever : ge;
+    if (several > out.moment) {
+      out.moment = several;
+      out.momentRule = few ? "lever rule (three stringers)" : "(0.77 + de/9.1) times the formula";
     }
   }
-  if (rigid > moment) {
-    moment = rigid;
-    momentRule = "rigid section";
+  if (rigid > out.moment) {
+    out.moment = rigid;
+    out.momentRule = "rigid section";
   }
-  if (rigid > shear) {
-    shear = rigid;
-    shearRule = "rigid section";
-  }
-  fill(out, moment, shear, Math.max(leverFatigue, rigidOne), momentRule, shearRule);
 }

@@ -139,6 +139,8 @@ export const elasticBuckling = formula(
 export interface BareCapacity {
   /** Rpc Myc, the lesser of flange and lateral buckling, kip-in; 0 outside the rules. */
   momentKipIn: number;
+  /** Lateral torsional buckling alone, kip-in; 0 outside the rules. */
+  lateralKipIn: number;
   flangeSlenderness: number;
   webSlenderness: number;
   flangeLimit: number;
@@ -150,6 +152,7 @@ export interface BareCapacity {
 /** A fresh capacity to be filled. */
 export const newBareCapacity = (): BareCapacity => ({
   momentKipIn: 0,
+  lateralKipIn: 0,
   flangeSlenderness: 0,
   webSlenderness: 0,
   flangeLimit: 0,
@@ -183,6 +186,7 @@ export function bareCapacity(shape: ShapeFigures, Fy: number, Lb: number, out: B
   out.flangeLimit = lf <= lpf ? lpf : FLANGE_PROPORTION;
   out.bracingLimitIn = 0;
   let capacity = Mmax;
+  let lateral = Mmax;
   if (Lb > 0) {
     const Fyr = residualYield.of(Fy);
     recorder?.step(residualYield, Fyr, Fy);
@@ -192,11 +196,12 @@ export function bareCapacity(shape: ShapeFigures, Fy: number, Lb: number, out: B
       capacity = flangeBuckling.of(Fyr, Sx, Mmax, lf, lpf, lrf);
       recorder?.step(flangeBuckling, capacity, Fyr, Sx, Mmax, lf, lpf, lrf);
     }
-    const lateral = lateralBuckling({ D, bf, tf, tw, J, Sx, h: d - tf }, Fy, Fyr, Mmax, Lb, out, recorder);
+    lateral = lateralBuckling({ D, bf, tf, tw, J, Sx, h: d - tf }, Fy, Fyr, Mmax, Lb, out, recorder);
     capacity = Math.min(capacity, lateral);
   }
   const sound = lw <= WEB_PROPORTION && lf <= FLANGE_PROPORTION && lw <= noncompactWebLimit.of(E, Fy);
   out.momentKipIn = sound ? capacity : 0;
+  out.lateralKipIn = sound ? lateral : 0;
 }
 
 /** Rpc Myc, kip-in. Source: AASHTO LRFD, 9th ed., Art. A6.2. */

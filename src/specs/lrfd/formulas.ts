@@ -157,13 +157,31 @@ export const pourStress = formula(
   ["Ma", "Mb", "Sx"],
   (Ma: number, Mb: number, Sx: number) => (12 * Math.max(Ma, Mb)) / Sx,
 );
+/** Flange buckling of the bare shape: compact, and on the straight line to 0.7 Fy. Source: AASHTO LRFD, 9th ed., Art. 6.10.8.2.2. */
+export const pourFlangeLimit = formula(
+  "lpf",
+  "0.38 * sqrt(E / Fy)",
+  "-",
+  "6.10.8.2.2",
+  ["E", "Fy"],
+  (E: number, Fy: number) => 0.38 * Math.sqrt(E / Fy),
+);
+export const pourFlange = formula(
+  "Fflb",
+  "(1 - 0.3 * max(0, lf - lpf) / (0.56 * sqrt(E / (0.7 * Fy)) - lpf)) * Fy",
+  "ksi",
+  "6.10.8.2.2",
+  ["lf", "lpf", "E", "Fy"],
+  (lf: number, lpf: number, E: number, Fy: number) => (1 - (0.3 * Math.max(0, lf - lpf)) / (0.56 * Math.sqrt(E / (0.7 * Fy)) - lpf)) * Fy,
+);
+/** The lesser of flange buckling, lateral buckling by Appendix A6, and yield. Source: AASHTO LRFD, 9th ed., Art. 6.10.3.2.1, A6.3.3. */
 export const pourResistance = formula(
   "Fnc",
-  "min(Fy, Mnc / Sx)",
+  "min(Fy, Fflb, Mltb / Sx)",
   "ksi",
   "6.10.3.2.1",
-  ["Fy", "Mnc", "Sx"],
-  (Fy: number, Mnc: number, Sx: number) => Math.min(Fy, Mnc / Sx),
+  ["Fy", "Fflb", "Mltb", "Sx"],
+  (Fy: number, Fflb: number, Mltb: number, Sx: number) => Math.min(Fy, Fflb, Mltb / Sx),
 );
 export const pourBuckling = formula("fnc", "fbu + fl / 3", "ksi", "6.10.3.2.1", ["fbu", "fl"], (fbu: number, fl: number) => fbu + fl / 3);
 export const pourYielding = formula("fny", "fbu + fl", "ksi", "6.10.3.2.1", ["fbu", "fl"], (fbu: number, fl: number) => fbu + fl);

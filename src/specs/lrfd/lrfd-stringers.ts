@@ -237,7 +237,7 @@ export abstract class LrfdStringers extends StringerAssessor {
     this.check(index, "fatigue", range, resistanceKsi, "ksi", "6.6.1.2", recorder);
   }
 
-  /** The bare shape under the wet deck, the worst of three conditions. Source: AASHTO LRFD, 9th ed., Art. 3.4.2.1, 6.10.3.2. */
+  /** The bare shape under the wet deck, the worst of three conditions. Source: AASHTO LRFD, 9th ed., Art. 3.4.2.1, 6.10.3.2; flange buckling by 6.10.8.2.2, for A6 may stand in for lateral buckling alone. */
   protected checkPour(index: number, { shape, fyKsi: Fy }: Steel, recorder: AssessmentRecorder | null): void {
     const { bridge } = this.design;
     if (bridge.deck.kind !== "concrete") return;
@@ -256,8 +256,13 @@ export abstract class LrfdStringers extends StringerAssessor {
     recorder?.step(rules.pourStress, fbu, Ma, Mb, Sx);
     const bare = this.#pour;
     bareCapacity(shape, Fy, this.diaphragmsIn, bare, recorder);
-    const Fnc = rules.pourResistance.of(Fy, bare.momentKipIn, Sx);
-    recorder?.step(rules.pourResistance, Fnc, Fy, bare.momentKipIn, Sx);
+    const lf = bare.flangeSlenderness;
+    const lpf = rules.pourFlangeLimit.of(E, Fy);
+    recorder?.step(rules.pourFlangeLimit, lpf, E, Fy);
+    const Fflb = rules.pourFlange.of(lf, lpf, E, Fy);
+    recorder?.step(rules.pourFlange, Fflb, lf, lpf, E, Fy);
+    const Fnc = rules.pourResistance.of(Fy, Fflb, bare.lateralKipIn, Sx);
+    recorder?.step(rules.pourResistance, Fnc, Fy, Fflb, bare.lateralKipIn, Sx);
     let demand = rules.pourBuckling.of(fbu, fl);
     recorder?.step(rules.pourBuckling, demand, fbu, fl);
     let capacity = Fnc;

@@ -56,7 +56,7 @@ function deckAssumptions(bridge: Bridge): string[] {
   const asked = askedYieldStress(bridge);
   list.push(`Fy ${shown(asked.fyKsi)} ksi unless a list's row says otherwise.`);
   list.push(
-    bracing.topFlange === "held"
+    bracing.topFlange === "held" || deck.composite
       ? `Compression flange held by the deck in service; diaphragms at ${feetText(bracing.diaphragmSpacingFt)} ft alone while the deck is poured.`
       : `Compression flange braced by diaphragms at ${feetText(bracing.diaphragmSpacingFt)} ft, not by the deck.`,
   );

@@ -17,13 +17,15 @@ export interface CsvRow {
  * @throws {InputError} on a quote that never ends or stands astray
  */
 export function readCsvRows(text: string, file: string): CsvRow[] {
-  const body = text.startsWith("\uFEFF") ? text.slice(1) : text;
+  // One kind of line end throughout: the parser guesses one from the header and would miss the others.
+  const body = text.replace(/^\uFEFF/, "").replace(/\r\n?/g, "\n");
   const rows: CsvRow[] = [];
   const faults: { line: number; problem: string }[] = [];
   let line = 1;
   let read = 0;
   Papa.parse<string[]>(body, {
     delimiter: ",",
+    newline: "\n",
     step: ({ data, errors, meta }) => {
       for (const error of errors) {
         if (error.type === "Quotes") faults.push({ line, problem: error.message });
@@ -43,9 +45,6 @@ export function readCsvRows(text: string, file: string): CsvRow[] {
 
 function lineBreaks(text: string, from: number, to: number): number {
   let count = 0;
-  for (let at = from; at < to; at++) {
-    const code = text.charCodeAt(at);
-    if (code === 10 || (code === 13 && text.charCodeAt(at + 1) !== 10)) count++;
-  }
+  for (let at = text.indexOf("\n", from); at >= 0 && at < to; at = text.indexOf("\n", at + 1)) count++;
   return count;
 }

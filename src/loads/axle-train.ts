@@ -101,6 +101,7 @@ function sumBefore(train: AxleTrain, first: number, under: number): number {
  * Source: statics.
  */
 export function greatestMomentAt(train: AxleTrain, spanFt: number, atFt: number): number {
+  requirePositive("spanFt", spanFt);
   const x = atFt;
   const L = spanFt;
   return greatestWithAxleAt(train, x, (a) => (a < 0 || a > L ? 0 : a <= x ? (a * (L - x)) / L : (x * (L - a)) / L));
@@ -113,6 +114,7 @@ export function greatestMomentAt(train: AxleTrain, spanFt: number, atFt: number)
  * Source: statics.
  */
 export function greatestShearAt(train: AxleTrain, spanFt: number, atFt: number): number {
+  requirePositive("spanFt", spanFt);
   const L = spanFt;
   const towards = (x: number): number => greatestWithAxleAt(train, x, (a) => (a < 0 || a > L ? 0 : a >= x ? (L - a) / L : -a / L));
   return Math.max(towards(atFt), towards(L - atFt));
@@ -145,6 +147,7 @@ export interface EndPlace {
  * Source: statics; needed apart for AASHTO Standard Specifications, 17th ed., Art. 3.23.1.2.
  */
 export function endPlaces(train: AxleTrain, spanFt: number): EndPlace[] {
+  requirePositive("spanFt", spanFt);
   const result: EndPlace[] = [];
   for (const driven of [train, reversed(train)]) {
     const places = axlePlacesFt(driven);
@@ -171,6 +174,7 @@ export function endPlaces(train: AxleTrain, spanFt: number): EndPlace[] {
  * Source: statics (superposition of P b x (L^2 - b^2 - x^2)/6 E I L).
  */
 export function greatestDeflectionAt(train: AxleTrain, spanFt: number, atFt: number): number {
+  requirePositive("spanFt", spanFt);
   const L = spanFt;
   let best = 0;
   for (const driven of [train, reversed(train)]) {

@@ -21,7 +21,13 @@ const WF36X194: ShapeFigures = {
 
 it("moments and web limit of the held shape", () => {
   const steps = new Map<string, number>();
-  const recorder: Recorder = { topic: () => {}, value: () => {}, step: (formula, result) => steps.set(formula.symbol, result) };
+  const recorder: Recorder = {
+    topic: () => {},
+    value: () => {},
+    step: (formula, result, ..._numbers) => {
+      steps.set(formula.symbol, result);
+    },
+  };
   const out = newBareCapacity();
   bareCapacity(WF36X194, 33, 0, out, recorder);
   expect(steps.get("Myc")).toBeCloseTo(21912, 6);

@@ -4,7 +4,7 @@
 import { describe, expect, it } from "vitest";
 import { check } from "../../../../src/answers/check.js";
 import type { Shape } from "../../../../src/catalogue/shape.js";
-import { type FlexureCapacity, flexureCapacity, newFlexureCapacity } from "../../../../src/specs/lfd/flexure.js";
+import { type FlexureCapacity, flexureCapacity, newFlexureCapacity, partiallyBracedMoment } from "../../../../src/specs/lfd/flexure.js";
 import { preparedOf } from "../../../support/question.js";
 import { invented, shapeNamed } from "../../../support/shapes.js";
 
@@ -143,6 +143,15 @@ describe.each(GRADES)("Fy %i ksi, bracing", (Fy) => {
     }
     expect(capped).toBeGreaterThan(10);
     expect(free).toBeGreaterThan(100);
+  });
+
+  it("the line a checker reads, Mr alone, is capped as well", () => {
+    const { flangeWidthIn: bf, flangeThicknessIn: tf, depthIn: d, torsionJIn4: J, sectionModulusXIn3: Sx } = shape;
+    const Mr = (Lb: number) => partiallyBracedMoment.of(Fy, Sx, 1, (tf * bf ** 3) / 12, Lb, J, d);
+    expect(uncappedMr(shape, 20)).toBeGreaterThan(elastic(shape, Fy));
+    expect(Mr(20)).toBeCloseTo(elastic(shape, Fy), 9);
+    expect(uncappedMr(shape, 700)).toBeLessThan(elastic(shape, Fy));
+    expect(Mr(700)).toBeCloseTo(uncappedMr(shape, 700), 9);
   });
 
   it("meets its cap without a step", () => {

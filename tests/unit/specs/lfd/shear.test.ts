@@ -23,14 +23,14 @@ describe.each([33, 36, 50])("Fy %i ksi", (Fy) => {
 
   it("then that limit over D/tw, without a step, up to 237 sqrt(k)/sqrt(Fy)", () => {
     expect(web(first * (1 + HAIR)).C).toBeCloseTo(1, 8);
-    for (const slenderness of [first * 1.05, first * 1.1, second * (1 - HAIR)]) {
+    for (const slenderness of [first * 1.001, first * 1.05, first * 1.1, second * (1 - HAIR)]) {
       expect(web(slenderness).C).toBeCloseTo((190 * Math.sqrt(5)) / (slenderness * Math.sqrt(Fy)), 12);
     }
     expect(web(second * (1 - HAIR)).C).toBeCloseTo(190 / 237, 8);
   });
 
   it("then 45000 k/((D/tw)^2 Fy)", () => {
-    for (const slenderness of [second * (1 + HAIR), second * 1.1, 150]) {
+    for (const slenderness of [second * (1 + HAIR), second * 1.001, second * 1.1, 150]) {
       expect(web(slenderness).C).toBeCloseTo((45000 * 5) / (slenderness ** 2 * Fy), 12);
     }
     // The two rules meet within a tenth of a per cent where one takes over from the other: 45000/237^2 against 190/237.

@@ -49,3 +49,18 @@ export function requirePositive(name: string, value: number): void {
     throw new RangeError(`${name} must be finite and above zero, got ${value}`);
   }
 }
+
+/**
+ * Throws when a number anywhere inside a value is not finite.
+ *
+ * @param name what the value is, for the message
+ * @param value a number, or an object or list that holds some, however deep
+ * @throws {RangeError} naming the first number that is NaN or infinite, by its path
+ */
+export function requireFinite(name: string, value: unknown): void {
+  if (typeof value === "number") {
+    if (!Number.isFinite(value)) throw new RangeError(`${name} must be finite, got ${value}`);
+  } else if (typeof value === "object" && value !== null) {
+    for (const [key, inner] of Object.entries(value)) requireFinite(`${name}.${key}`, inner);
+  }
+}

@@ -22,3 +22,16 @@ export const UNIT_WEIGHT_PCF = {
   timber: 50,
   asphalt: 150,
 } as const;
+
+/** Millimetres in an inch, exact. */
+export const MM_PER_IN = 25.4;
+/** Kilograms in a pound (avoirdupois), exact. */
+export const KG_PER_LB = 0.45359237;
+/** Newtons in a pound of force: KG_PER_LB times standard gravity, 9.80665 m/s2, exact. */
+export const N_PER_LB = KG_PER_LB * 9.80665;
+/** Kips per square inch in a megapascal (N/mm2). */
+export const KSI_PER_MPA = MM_PER_IN ** 2 / (N_PER_LB * LB_PER_KIP);
+/** Pounds in a hundredweight, as US steel is priced. */
+export const LB_PER_CWT = 100;
+/** Pounds in a short ton. */
+export const LB_PER_TON = 2000;

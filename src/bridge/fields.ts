@@ -96,7 +96,7 @@ export const FIELDS: Readonly<Record<string, Field>> = {
   "deck.haunchWeightIn": inches(0, 12),
   "deck.haunchSectionIn": inches(0, 12),
   "deck.maxSpacingFt": feet(0.5, 20, true),
-  "deck.fcKsi": number({ min: 2, max: 10, unit: "ksi" }),
+  "deck.fcKsi": number({ min: 2, max: 10, unit: "ksi", nullable: true }),
   "deck.modularRatio": number({ min: 4, max: 15, nullable: true }),
   "deck.composite": yesNo(true),
   "deck.formsPsf": number({ min: 0, max: 50, unit: "lb/ft2" }),

@@ -1,5 +1,6 @@
 import type { InputIssue } from "../errors.js";
 import { didYouMean } from "../nearest.js";
+import { readJson } from "../read-json.js";
 import type { Source } from "./bridge.js";
 import { FIELDS, KEYS } from "./fields.js";
 
@@ -35,14 +36,12 @@ export function readLayer(text: string, file: string, source: "practice" | "brid
   const values = new Map<string, unknown>();
   const issues: InputIssue[] = [];
   const place = (key: string): Pick<InputIssue, "file" | "field"> => ({ file, field: key });
-  let content: unknown;
-  try {
-    content = JSON.parse(text.replace(/^\uFEFF/, ""));
-  } catch (error) {
-    issues.push({ file, ...jsonFault(text, error), allowed: "one JSON object with the keys of a bridge file" });
+  const read = readJson(text);
+  if ("fault" in read) {
+    issues.push({ file, ...read.fault, allowed: "one JSON object with the keys of a bridge file" });
     return { source, values, place, issues };
   }
-  walk(content, "");
+  walk(read.value, "");
   return { source, values, place, issues };
 
   function walk(value: unknown, path: string): void {
@@ -128,11 +127,4 @@ function suggestKey(name: string, path: string): string {
 function show(value: unknown): string {
   const text = typeof value === "string" ? `"${value}"` : (JSON.stringify(value) ?? String(value));
   return text.length > 60 ? `${text.slice(0, 57)}...` : text;
-}
-
-function jsonFault(text: string, error: unknown): Pick<InputIssue, "line" | "problem"> {
-  const message = error instanceof Error ? error.message : String(error);
-  const position = /position (\d+)/.exec(message)?.[1];
-  const before = position === undefined ? text : text.slice(0, Number(position));
-  return { line: before.split("\n").length, problem: `not JSON: ${message.replace(/ in JSON at position \d+.*$/s, "")}` };
 }

@@ -164,9 +164,7 @@ class Draft {
   settleDeck(): DeckKind {
     const kind = (this.#values.get("deck.kind") as DeckKind | undefined) ?? "concrete";
     if (kind !== "concrete") this.#settleOtherDeck(kind);
-    else if (this.#number("deck.thicknessIn") === null) {
-      this.#fault("deck.thicknessIn", "a concrete deck needs its thickness", "a total thickness in inches");
-    }
+    else this.#settleConcreteDeck();
     const thickness = this.#number("deck.thicknessIn");
     if (this.#number("deck.maxSpacingFt") === null) {
       const most = greatestSpacingFt(kind, thickness);
@@ -180,6 +178,15 @@ class Draft {
       this.#fault("deck.sacrificialIn", `${sacrificial} in of a ${thickness} in deck`, "less than the thickness");
     }
     return kind;
+  }
+
+  #settleConcreteDeck(): void {
+    if (this.#number("deck.thicknessIn") === null && !this.#spoiled("deck.thicknessIn")) {
+      this.#fault("deck.thicknessIn", "a concrete deck needs its thickness", "a total thickness in inches");
+    }
+    if (this.#number("deck.fcKsi") === null && !this.#spoiled("deck.fcKsi")) {
+      this.#fault("deck.fcKsi", "a concrete deck needs its strength", "f'c in ksi");
+    }
   }
 
   #settleOtherDeck(kind: DeckKind): void {

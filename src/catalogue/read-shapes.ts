@@ -3,6 +3,7 @@ import { didYouMean } from "../nearest.js";
 import { COLUMNS, DESIGNATION_COLUMN, PLACE_COLUMN, STOCK_COLUMNS, YIELD_COLUMN } from "./columns.js";
 import { type CsvRow, readCsvRows } from "./read-rows.js";
 import { designationKey, type Shape, type ShapeFigures, type Stock } from "./shape.js";
+import { readText } from "./text-cells.js";
 
 /** A list read: its shapes, and remarks for the reader's eye that stop nothing. */
 export interface ShapeList {
@@ -104,7 +105,7 @@ function readRow(
     }
     return value;
   };
-  const designation = cell(DESIGNATION_COLUMN);
+  const designation = readText(cell(DESIGNATION_COLUMN));
   // biome-ignore lint/suspicious/noControlCharactersInRegex: a control character in a name is what is looked for
   if (!/^[^\u0000-\u001f]{1,60}$/.test(designation)) {
     fault(DESIGNATION_COLUMN, designation === "" ? "no designation" : "an unreadable designation", "a name of 1 to 60 characters");
@@ -125,6 +126,6 @@ function readRow(
     for (const { name, whole } of STOCK_COLUMNS) {
       if (whole && given(name) && !Number.isInteger(Number(cell(name)))) fault(name, `"${cell(name)}"`, "a whole number");
     }
-    return { ...(numbers as unknown as Omit<Stock, "place">), place: given(PLACE_COLUMN) ? cell(PLACE_COLUMN) : null };
+    return { ...(numbers as unknown as Omit<Stock, "place">), place: given(PLACE_COLUMN) ? readText(cell(PLACE_COLUMN)) : null };
   }
 }

@@ -10,10 +10,11 @@ const COLOURED: Style = {
   strong: (text) => styleText("bold", text),
 };
 
-// A reader that has seen enough, such as head, closes the pipe: that is no error.
+// A reader that has seen enough, such as head, closes the pipe: that is no error. A full disk is one, and no defect of ours.
 process.stdout.on("error", (error: NodeJS.ErrnoException) => {
-  if (error.code !== "EPIPE") throw error;
-  process.exit();
+  if (error.code === "EPIPE") process.exit();
+  process.stderr.write(`leanspan: the answer cannot be written: ${error.code === "ENOSPC" ? "the disk is full" : error.message}\n`);
+  process.exit(2);
 });
 
 process.exitCode = await run(process.argv.slice(2), {

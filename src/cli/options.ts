@@ -25,6 +25,13 @@ export interface Flags {
   readonly shapes?: string[];
   readonly without?: string[];
   readonly set?: string[];
+  /** Another list that `sections` compares the list in use with. */
+  readonly against?: string;
+  /** Flags of `import`. */
+  readonly out?: string;
+  readonly refused?: string;
+  readonly map?: string[];
+  readonly units?: string[];
   readonly top?: number;
   readonly price?: boolean;
   readonly json?: boolean;
@@ -95,7 +102,24 @@ export function addSectionFlags(command: Command): Command {
     .addOption(list("--max-depth <in>", "greatest depth"))
     .addOption(list("--min-weight <lb/ft>", "least weight"))
     .addOption(list("--max-weight <lb/ft>", "greatest weight"))
-    .addOption(list("--fy <ksi>", "least yield stress of the row's own steel; catalogue shapes come to 50"));
+    .addOption(list("--fy <ksi>", "least yield stress of the row's own steel; catalogue shapes come to 50"))
+    .addOption(new Option("--against <file>", "compare with this list: other figures, only here, only there").argParser(once));
+}
+
+/** Flags of the command that reads a list in anybody's columns. */
+export function addImportFlags(command: Command): Command {
+  return command
+    .addOption(new Option("--out <file>", "accepted rows in our columns, to be used with --sections").argParser(once))
+    .addOption(new Option("--refused <file>", "refused rows with their lines and reasons").argParser(once))
+    .addOption(
+      list(
+        "--map <name=header>",
+        "read NAME from the column HEADER (or #4, the fourth), as depthIn=H; `unread` leaves one aside; repeatable",
+      ),
+    )
+    .addOption(list("--units <units>", "us, metric, or COLUMN=UNIT, such as inertiaXIn4=cm4 or 'Ix=10^6 mm4'; repeatable"))
+    .option("--json", "the answer as JSON")
+    .option("--force", "replace existing files");
 }
 
 /** How the answer is handed over. */

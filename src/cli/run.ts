@@ -1,7 +1,16 @@
 import { Command, CommanderError } from "commander";
 import { InputError } from "../errors.js";
 import { EXIT, type ExitCode, type Io } from "./io.js";
-import { addBridgeFlags, addOutputFlags, addPriceFlag, addSectionFlags, addStringerFlags, addTopFlag, type Flags } from "./options.js";
+import {
+  addBridgeFlags,
+  addImportFlags,
+  addOutputFlags,
+  addPriceFlag,
+  addSectionFlags,
+  addStringerFlags,
+  addTopFlag,
+  type Flags,
+} from "./options.js";
 
 /**
  * Runs the command line: arguments to options to answer to exit code.
@@ -76,6 +85,14 @@ function build(io: Io, done: (code: ExitCode) => void): Command {
   ]);
   for (const flags of [addSectionFlags, addOutputFlags]) flags(sections);
   sections.action(async (flags: Flags) => done(await (await import("./sections.js")).runSections(flags, io)));
+
+  const importing = add("import", "read a list in anybody's columns and units, and check every row of it", [
+    "import data/examples/county-yard.csv",
+    "import data/examples/service-centre.csv --units metric --json",
+  ]).argument("<file>", "list as CSV text, as a spreadsheet saves it");
+  addImportFlags(importing).action(async (file: string, flags: Flags) =>
+    done(await (await import("./import.js")).runImport(file, flags, io)),
+  );
 
   const init = add("init", "a starting bridge file with every key", [
     "init otter-creek.json --span 62 --width 30 --force",

@@ -1,8 +1,12 @@
+import { compareLists } from "../answers/compare-lists.js";
 import { type SectionFilter, sections } from "../answers/sections.js";
 import { readInches } from "../bridge/lengths.js";
+import type { Shape } from "../catalogue/shape.js";
 import { InputError, type InputIssue } from "../errors.js";
+import { comparisonJson, comparisonRows } from "../report/comparison.js";
 import { sectionRows } from "../report/csv.js";
 import { sectionsJson } from "../report/json.js";
+import { comparisonText } from "../report/text/comparison.js";
 import { sectionsText } from "../report/text/sections.js";
 import { checkTargets, deliver } from "./deliver.js";
 import { gatherList } from "./gather.js";
@@ -18,6 +22,7 @@ export async function runSections(flags: Flags, io: Io): Promise<ExitCode> {
   await checkTargets(flags);
   for (const remark of remarks) io.stderr(`leanspan: ${remark}\n`);
   const listed = sections(shapes, filter);
+  if (flags.against !== undefined) return compare(listed, filter, flags, flags.against, io);
   await deliver(
     {
       text: () => sectionsText(listed, inList, io.style),
@@ -28,6 +33,23 @@ export async function runSections(flags: Flags, io: Io): Promise<ExitCode> {
     io,
   );
   return listed.length > 0 ? EXIT.found : EXIT.nothing;
+}
+
+/** The list in use beside another, both within the same bounds. */
+async function compare(here: readonly Shape[], filter: SectionFilter, flags: Flags, against: string, io: Io): Promise<ExitCode> {
+  const other = gatherList({ ...flags, sections: [against] });
+  for (const remark of other.remarks) io.stderr(`leanspan: ${remark}\n`);
+  const comparison = compareLists(here, sections(other.shapes, filter));
+  await deliver(
+    {
+      text: () => comparisonText(comparison, against, io.style),
+      json: () => comparisonJson(comparison, against),
+      rows: () => comparisonRows(comparison),
+    },
+    flags,
+    io,
+  );
+  return EXIT.found;
 }
 
 function readFilter(flags: Flags): SectionFilter {

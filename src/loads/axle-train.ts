@@ -1,5 +1,5 @@
 import { requirePositive } from "../errors.js";
-import { momentUnderAxle } from "./formulas.js";
+import { momentUnderAxle, momentUnderAxleAndLane } from "./formulas.js";
 
 /** Axles of one vehicle in one lane, front to rear: whole axles, kip, and the distances between them, ft. */
 export interface AxleTrain {
@@ -78,7 +78,7 @@ export function greatestMoment(train: AxleTrain, spanFt: number, uniformKlf: num
         const e = momentOfPlaces / R - places[under];
         const x = ((R * (L - e)) / L + (w * L) / 2) / ((2 * R) / L + w);
         if (x - (places[under] - places[first]) < 0 || x + (places[last] - places[under]) > L) continue;
-        const moment = momentUnderAxle.of(R, L, x, e, earlier) + (w * x * (L - x)) / 2;
+        const moment = w === 0 ? momentUnderAxle.of(R, L, x, e, earlier) : momentUnderAxleAndLane.of(R, L, x, e, earlier, w);
         if (moment > best.momentKipFt) {
           best = { momentKipFt: moment, atFt: x, resultantKip: R, eccentricityFt: e, earlierAxlesKipFt: earlier };
         }

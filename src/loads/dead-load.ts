@@ -20,11 +20,11 @@ export const deckByArea = formula("wdeck", "p * T / 1000", "kip/ft", "statics", 
 /** Weight of the haunch over the flange. Source: AASHTO Standard Specifications, 17th ed., Art. 3.3.6. */
 export const haunchWeight = formula(
   "whaunch",
-  "bf * th / 144 * 0.150",
+  "bf * thw / 144 * 0.150",
   "kip/ft",
   "3.3.6",
-  ["bf", "th"],
-  (bf: number, th: number) => ((bf * th) / IN2_PER_FT2) * CONCRETE_KCF,
+  ["bf", "thw"],
+  (bf: number, thw: number) => ((bf * thw) / IN2_PER_FT2) * CONCRETE_KCF,
 );
 /** Weight of stay-in-place forms between the flanges. Source: statics. */
 export const formsWeight = formula(

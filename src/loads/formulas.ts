@@ -10,14 +10,24 @@ export const momentUnderAxle = formula(
   (R: number, L: number, x: number, e: number, Me: number) => ((R * (L - x - e)) / L) * x - Me,
 );
 
+/** The same with a uniform load over the whole span in it. Source: statics. */
+export const momentUnderAxleAndLane = formula(
+  "MLL",
+  "R * (L - x - e) / L * x - Me + wl * x * (L - x) / 2",
+  "kip-ft",
+  "statics",
+  ["R", "L", "x", "e", "Me", "wl"],
+  (R: number, L: number, x: number, e: number, Me: number, wl: number) => ((R * (L - x - e)) / L) * x - Me + (wl * x * (L - x)) / 2,
+);
+
 /** Moment at midspan of a uniform lane load with one concentrated load. Source: statics. */
 export const laneMoment = formula(
   "MLL",
-  "w * L^2 / 8 + P * L / 4",
+  "wl * L^2 / 8 + Pl * L / 4",
   "kip-ft",
   "statics",
-  ["w", "L", "P"],
-  (w: number, L: number, P: number) => (w * L * L) / 8 + (P * L) / 4,
+  ["wl", "L", "Pl"],
+  (wl: number, L: number, Pl: number) => (wl * L * L) / 8 + (Pl * L) / 4,
 );
 
 /**

@@ -1,5 +1,6 @@
 import * as z from "zod";
 import { InputError, type InputIssue } from "../errors.js";
+import { readJson } from "../read-json.js";
 import { type AxleTrain, grossWeightKip } from "./axle-train.js";
 
 /** A lane loading: uniform load and the concentrated load that goes with it for moment, and for shear. */
@@ -58,12 +59,9 @@ const FORM =
  * @throws {InputError} naming every fault
  */
 export function readVehicles(text: string, file: string, known: readonly Vehicle[]): readonly Vehicle[] {
-  let content: unknown;
-  try {
-    content = JSON.parse(text.replace(/^\uFEFF/, ""));
-  } catch (error) {
-    throw new InputError([{ file, problem: `not JSON: ${(error as Error).message}`, allowed: FORM }]);
-  }
+  const read = readJson(text);
+  if ("fault" in read) throw new InputError([{ file, ...read.fault, allowed: FORM }]);
+  const content = read.value;
   if (!Array.isArray(content)) throw new InputError([{ file, problem: "the file does not hold a list", allowed: FORM }]);
   const issues: InputIssue[] = [];
   const vehicles: Vehicle[] = [];

@@ -1,5 +1,5 @@
 import type { ShapeFigures } from "../catalogue/shape.js";
-import { formula, type Recorder } from "../formula.js";
+import { formula, type Recorder, renamed } from "../formula.js";
 
 /** A concrete slab over a steel shape, of equal strains with it. All lengths in inches. */
 export interface Slab {
@@ -92,11 +92,13 @@ export function transformed(
   out.topIn3 = topModulus.of(I, d, y);
   out.slabMomentIn3 = slabMoment.of(be, ts, n, d, th, y);
   if (recorder === null) return;
-  recorder.value("n", n, "-", mark === "n" ? "modular ratio, live load" : "three times the modular ratio, lasting load");
-  recorder.step({ ...transformedAxis, symbol: `y${mark}` }, y, A, d, be, ts, n, th);
-  recorder.step({ ...transformedInertia, symbol: `I${mark}` }, I, Ix, A, y, d, be, ts, n, th);
-  recorder.step({ ...bottomModulus, symbol: `Sb${mark}` }, out.bottomIn3, I, y);
-  recorder.step({ ...topModulus, symbol: `St${mark}` }, out.topIn3, I, d, y);
+  const names = { n: mark === "n" ? "n" : "n3", y: `y${mark}`, I: `I${mark}` };
+  recorder.value("th", th, "in", "haunch in section properties");
+  recorder.value(names.n, n, "-", mark === "n" ? "modular ratio, live load" : "three times the modular ratio, lasting load");
+  recorder.step(renamed(transformedAxis, names.y, names), y, A, d, be, ts, n, th);
+  recorder.step(renamed(transformedInertia, names.I, names), I, Ix, A, y, d, be, ts, n, th);
+  recorder.step(renamed(bottomModulus, `Sb${mark}`, names), out.bottomIn3, I, y);
+  recorder.step(renamed(topModulus, `St${mark}`, names), out.topIn3, I, d, y);
 }
 
 /**

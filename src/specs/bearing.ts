@@ -5,11 +5,11 @@ import { STEEL_MODULUS_KSI } from "../units.js";
 /** Web yielding over an end bearing, phi = 1.0. Source: AASHTO LRFD, 9th ed., Art. D6.5.2. */
 export const webYielding = formula(
   "Rwy",
-  "(2.5 * k + N) * Fy * tw",
+  "(2.5 * kdes + N) * Fy * tw",
   "kip",
   "D6.5.2",
-  ["k", "N", "Fy", "tw"],
-  (k: number, N: number, Fy: number, tw: number) => (2.5 * k + N) * Fy * tw,
+  ["kdes", "N", "Fy", "tw"],
+  (kdes: number, N: number, Fy: number, tw: number) => (2.5 * kdes + N) * Fy * tw,
 );
 /** Web crippling over an end bearing, N/d <= 0.2, phi = 0.80. Source: AASHTO LRFD, 9th ed., Art. D6.5.3. */
 export const webCripplingShort = formula(

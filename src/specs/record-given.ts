@@ -1,6 +1,6 @@
 import type { Layout } from "../bridge/layouts.js";
 import type { Steel } from "../bridge/yield-stress.js";
-import { impactFraction, laneMoment, momentUnderAxle } from "../loads/formulas.js";
+import { impactFraction, laneMoment, momentUnderAxle, momentUnderAxleAndLane } from "../loads/formulas.js";
 import { STEEL_MODULUS_KSI } from "../units.js";
 import type { AssessmentRecorder, Design } from "./contract.js";
 
@@ -36,7 +36,7 @@ export function recordGiven(
   recorder.value("J", shape.torsionJIn4, "in4", name);
   recorder.value("h/tw", shape.webSlenderness, "-", "clear of the fillets, as the list prints it; for comparison with D/tw");
   if (deck.thicknessIn !== null) recorder.value("t", deck.thicknessIn, "in", "deck, total thickness");
-  recorder.value("th", deck.haunchWeightIn, "in", "haunch in the weight");
+  recorder.value("thw", deck.haunchWeightIn, "in", "haunch in the weight");
   recorder.value("wb", barriers.weightKlf, "kip/ft", "one barrier");
   recorder.value("pw", bridge.wearingPsf, "lb/ft2", "wearing surface");
   if (deck.deckPsf !== null) recorder.value("p", deck.deckPsf, "lb/ft2", "deck");
@@ -57,7 +57,11 @@ export function recordLaneEffects({ bridge, live, vehicle }: Design, impact: num
     recorder.value("x", x, "ft", "place of the axle the moment stands under");
     recorder.value("e", e, "ft", "place of the resultant minus place of that axle");
     recorder.value("Me", Me, "kip-ft", "axles before that one, about it");
-    recorder.step(momentUnderAxle, live.momentKipFt, R, bridge.spanFt, x, e, Me);
+    if (live.includesImpact) {
+      const wl = live.lane?.uniformKlf ?? 0;
+      recorder.value("wl", wl, "kip/ft", "uniform lane load; the axles hold the dynamic allowance");
+      recorder.step(momentUnderAxleAndLane, live.momentKipFt, R, bridge.spanFt, x, e, Me, wl);
+    } else recorder.step(momentUnderAxle, live.momentKipFt, R, bridge.spanFt, x, e, Me);
   } else if (live.lane !== null) {
     recorder.step(laneMoment, live.momentKipFt, live.lane.uniformKlf, bridge.spanFt, live.lane.momentKip);
   }

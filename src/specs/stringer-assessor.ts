@@ -3,8 +3,9 @@ import { nextLaneStepFt } from "../bridge/lanes.js";
 import type { Layout } from "../bridge/layouts.js";
 import type { Steel } from "../bridge/yield-stress.js";
 import type { Shape } from "../catalogue/shape.js";
+import { requireFinite } from "../errors.js";
 import { formula } from "../formula.js";
-import { ABSENT, type AssessmentRecorder, type Assessor, type CheckId, type CheckKind, type Position } from "./contract.js";
+import { ABSENT, type AssessmentRecorder, type Assessor, type CheckId, type CheckKind, type Design, type Position } from "./contract.js";
 
 /** Roadways less than this below the next lane count are pointed out, ft. Source: common practice. */
 const LANE_STEP_MARGIN_FT = 2;
@@ -85,7 +86,13 @@ export abstract class StringerAssessor implements Assessor {
   readonly #advisoriesRequired: boolean;
   #screening = false;
 
-  constructor(bridge: Bridge, layout: Layout) {
+  /** @throws {RangeError} if a number of bridge, live load or layout is not finite */
+  constructor(design: Design, layout: Layout) {
+    const { bridge } = design;
+    requireFinite("bridge", bridge);
+    requireFinite("vehicle", design.vehicle);
+    requireFinite("live", design.live);
+    requireFinite("layout", layout);
     this.layout = layout;
     this.positions = positionsOf(layout.count);
     const uses = {
@@ -135,7 +142,8 @@ export abstract class StringerAssessor implements Assessor {
   ): void {
     const place = PLACE[slot];
     if (!this.#used[place]) return;
-    const ratio = demand / capacity;
+    // A capacity that is nothing or less carries no load at all: a ratio below zero would read as one that fits.
+    const ratio = capacity > 0 ? demand / capacity : Number.POSITIVE_INFINITY;
     this.ratios[index * SLOTS.length + place] = ratio;
     const kind = this.#kinds[place];
     if (this.#screening && !(ratio <= 1) && kind !== "advisory") this.settled = true;
@@ -166,6 +174,10 @@ export abstract class StringerAssessor implements Assessor {
     this.advisoriesOff = this.#screening && !this.#advisoriesRequired;
     for (let index = 0; index < this.positions.length && !this.settled; index++) this.assessStringer(index, steel, recorder);
     this.#decide();
+    if (!soundFigures(steel)) {
+      this.passes = false;
+      this.governingRatio = Number.POSITIVE_INFINITY;
+    }
   }
 
   /** The worst failing required check, else the worst required demand; what is not a number fails as infinity. */
@@ -193,6 +205,32 @@ export abstract class StringerAssessor implements Assessor {
     this.governingSlot = failing >= 0 ? failing : worst;
     this.governingRatio = failing >= 0 ? failingRatio : worstRatio;
   }
+}
+
+/** Whether every figure of a shape is finite: what is not makes the sum of all NaN or infinite. */
+function soundFigures({ shape, fyKsi }: Steel): boolean {
+  const sum =
+    fyKsi +
+    shape.weightPlf +
+    shape.areaIn2 +
+    shape.depthIn +
+    shape.flangeWidthIn +
+    shape.webThicknessIn +
+    shape.flangeThicknessIn +
+    shape.kDesignIn +
+    shape.inertiaXIn4 +
+    shape.sectionModulusXIn3 +
+    shape.radiusXIn +
+    shape.plasticModulusXIn3 +
+    shape.inertiaYIn4 +
+    shape.sectionModulusYIn3 +
+    shape.radiusYIn +
+    shape.plasticModulusYIn3 +
+    shape.torsionJIn4 +
+    shape.warpingCwIn6 +
+    shape.flangeSlenderness +
+    shape.webSlenderness;
+  return Math.abs(sum) < Number.POSITIVE_INFINITY;
 }
 
 /** Two stringers are both exterior; of an unknown number one interior stringer is asked for. */

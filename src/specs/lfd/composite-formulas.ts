@@ -81,11 +81,11 @@ export const yieldMoment = formula(
 /** Staged stress at the bottom of the steel. Source: AASHTO Standard Specifications, 17th ed., Art. 10.50(b); statics. */
 export const bottomStress = formula(
   "fb",
-  "12 * M1 / Sx + 12 * M2 / Sb3n + 12 * fL / Sbn",
+  "12 * M1 / Sx + 12 * M2w / Sb3n + 12 * fL / Sbn",
   "ksi",
   "10.50(b)",
-  ["M1", "Sx", "M2", "Sb3n", "fL", "Sbn"],
-  (M1: number, Sx: number, M2: number, Sb3n: number, fL: number, Sbn: number) => (12 * M1) / Sx + (12 * M2) / Sb3n + (12 * fL) / Sbn,
+  ["M1", "Sx", "M2w", "Sb3n", "fL", "Sbn"],
+  (M1: number, Sx: number, M2w: number, Sb3n: number, fL: number, Sbn: number) => (12 * M1) / Sx + (12 * M2w) / Sb3n + (12 * fL) / Sbn,
 );
 /** Staged stress at the top of the steel; what is in tension there is put in as 0. Source: as the bottom's. */
 export const topStress = formula(

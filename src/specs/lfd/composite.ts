@@ -151,6 +151,7 @@ export class CompositeStringers extends LfdStringers {
     const Sx = shape.sectionModulusXIn3;
     const lasting = M2 + Mw;
     recorder?.topic("overload");
+    recorder?.value("M2w", lasting, "kip-ft", "stage 2 and wearing surface");
     recorder?.value("fL", fL, "kip-ft", "live moment times its overload factor: 5/3, or 2.20 of one lane where Group IA governs");
     const fb = composite.bottomStress.of(M1, Sx, lasting, this.#long.bottomIn3, fL, this.#short.bottomIn3);
     recorder?.step(composite.bottomStress, fb, M1, Sx, lasting, this.#long.bottomIn3, fL, this.#short.bottomIn3);

@@ -55,7 +55,7 @@ export const leverExterior = (spacingFt: number, curbInsideFt: number, mostTruck
   leverRuleExterior(spacingFt, curbInsideFt, mostTrucks, laneReduction);
 
 /** S over the table's divisor. Source: AASHTO Standard Specifications, 17th ed., Table 3.23.1. */
-export const spacingOverDivisor = formula("g", "S / k", "wheel lines", "Table 3.23.1", ["S", "k"], (S: number, k: number) => S / k);
+export const spacingOverDivisor = formula("g", "S / kd", "wheel lines", "Table 3.23.1", ["S", "kd"], (S: number, kd: number) => S / kd);
 /** Floor for the exterior stringer under concrete, S <= 6 ft. Source: AASHTO Standard Specifications, 17th ed., Art. 3.23.2.3.1.5. */
 export const exteriorFloorNarrow = formula("gmin", "S / 5.5", "wheel lines", "3.23.2.3.1.5", ["S"], (S: number) => S / 5.5);
 /** The same, 6 < S <= 14 ft. Source: AASHTO Standard Specifications, 17th ed., Art. 3.23.2.3.1.5. */

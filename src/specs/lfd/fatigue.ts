@@ -73,4 +73,4 @@ export const fatigueMoment = formula(
   (MT: number, g: number, I: number) => (MT / 2) * g * (1 + I),
 );
 /** Stress range at the extreme tension fibre. Source: AASHTO Standard Specifications, 17th ed., Art. 10.3.1. */
-export const fatigueRange = formula("fsr", "12 * Mf / Sx", "ksi", "10.3.1", ["Mf", "Sx"], (Mf: number, Sx: number) => (12 * Mf) / Sx);
+export const fatigueRange = formula("fsr", "12 * Mf / Sf", "ksi", "10.3.1", ["Mf", "Sf"], (Mf: number, Sf: number) => (12 * Mf) / Sf);

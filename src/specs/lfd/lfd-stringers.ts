@@ -77,7 +77,7 @@ export abstract class LfdStringers extends StringerAssessor {
 
   constructor(design: Design, layout: Layout) {
     const { bridge } = design;
-    super(bridge, layout);
+    super(design, layout);
     this.design = design;
     this.fixed = lfdLayout(design, layout);
     this.stringers = this.positions.map((position) => stringerLoads(this.fixed, position, null));

@@ -4,7 +4,7 @@ import { formula } from "../../formula.js";
 export const constructionLoad = formula("wc", "q * T / 1000", "kip/ft", "statics", ["q", "T"], (q: number, T: number) => (q * T) / 1000);
 /** Factored moment while the deck is poured. Source: AASHTO Standard Specifications, 17th ed., Art. 10.61; the factor is our choice. */
 export const pourMoment = formula(
-  "Mp",
+  "Mpour",
   "1.3 * (w1 + wc) * L^2 / 8",
   "kip-ft",
   "10.61",

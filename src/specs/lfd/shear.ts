@@ -15,20 +15,20 @@ export const shearYielding = formula(
 /** Web that buckles beyond yielding. Source: AASHTO Standard Specifications, 17th ed., Art. 10.48.8.1. */
 export const shearInelastic = formula(
   "Vcap",
-  "0.58 * Fy * D * tw * 190 * sqrt(k) / sqrt(Fy) / (D / tw)",
+  "0.58 * Fy * D * tw * 190 * sqrt(kv) / sqrt(Fy) / (D / tw)",
   "kip",
   "10.48.8.1",
-  ["Fy", "D", "tw", "k"],
-  (Fy: number, D: number, tw: number, k: number) => (0.58 * Fy * D * tw * 190 * Math.sqrt(k)) / Math.sqrt(Fy) / (D / tw),
+  ["Fy", "D", "tw", "kv"],
+  (Fy: number, D: number, tw: number, kv: number) => (0.58 * Fy * D * tw * 190 * Math.sqrt(kv)) / Math.sqrt(Fy) / (D / tw),
 );
 /** Web that buckles elastically. Source: AASHTO Standard Specifications, 17th ed., Art. 10.48.8.1. */
 export const shearElastic = formula(
   "Vcap",
-  "0.58 * Fy * D * tw * 45000 * k / ((D / tw)^2 * Fy)",
+  "0.58 * Fy * D * tw * 45000 * kv / ((D / tw)^2 * Fy)",
   "kip",
   "10.48.8.1",
-  ["Fy", "D", "tw", "k"],
-  (Fy: number, D: number, tw: number, k: number) => (0.58 * Fy * D * tw * 45000 * k) / ((D / tw) ** 2 * Fy),
+  ["Fy", "D", "tw", "kv"],
+  (Fy: number, D: number, tw: number, kv: number) => (0.58 * Fy * D * tw * 45000 * kv) / ((D / tw) ** 2 * Fy),
 );
 
 /**

@@ -1,4 +1,5 @@
 import type { Layout } from "../../bridge/layouts.js";
+import { requireFinite } from "../../errors.js";
 import { greatestMoment } from "../../loads/axle-train.js";
 import { type DeadLoad, deadLoadOf } from "../../loads/dead-load.js";
 import { impactFraction } from "../../loads/formulas.js";
@@ -53,6 +54,7 @@ export function lfdLayout(design: Design, layout: Layout): LfdLayout {
   const { lanes } = bridge.liveLoad;
   const fatigueImpact = impactFraction.of(bridge.spanFt);
   const fatigueTruck = vehicleNamed(design.vehicles, FATIGUE_VEHICLE).trains[0];
+  requireFinite("fatigue truck", fatigueTruck);
   return {
     design,
     layout,

@@ -1,5 +1,6 @@
 import type { Layout } from "../../bridge/layouts.js";
 import type { Steel } from "../../bridge/yield-stress.js";
+import { renamed } from "../../formula.js";
 import { newTransformedSection, topStressKsi, transformed } from "../../section/composite.js";
 import { newPlasticSection, plasticMoment, slabForce, steelForce } from "../../section/plastic-moment.js";
 import { STEEL_MODULUS_KSI } from "../../units.js";
@@ -112,7 +113,8 @@ export class CompositeLrfdStringers extends LrfdStringers {
     const ft3n = topStressKsi(1.25 * M2 + 1.5 * Mw, this.#long.topIn3);
     const ftn = topStressKsi(1.75 * ML, this.#short.topIn3);
     const ftu = rules.serviceTop.of(1.25 * M1, Sx, ft3n, ftn);
-    recorder?.step(rules.serviceTop, ftu, 1.25 * M1, Sx, ft3n, ftn);
+    recorder?.value("Mf1", 1.25 * M1, "kip-ft", "1.25 times stage 1");
+    recorder?.step(renamed(rules.serviceTop, "ftu", { M1: "Mf1" }), ftu, 1.25 * M1, Sx, ft3n, ftn);
     this.check(index, "flexure", Math.max(fbu, ftu), Fy, "ksi", "6.10.7.2", recorder);
   }
 

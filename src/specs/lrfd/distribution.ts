@@ -99,7 +99,7 @@ export const rigidSection = formula(
   (m: number, N: number, Nb: number, X: number, sume: number, sumx2: number) => m * (N / Nb + (X * sume) / sumx2),
 );
 /** Spacing over the table's divisor, decks other than concrete. Source: AASHTO LRFD, 9th ed., Table 4.6.2.2.2a-1. */
-export const spacingOverDivisor = formula("g", "S / k", "lanes", "4.6.2.2.2a", ["S", "k"], (S: number, k: number) => S / k);
+export const spacingOverDivisor = formula("g", "S / kd", "lanes", "4.6.2.2.2a", ["S", "kd"], (S: number, kd: number) => S / kd);
 
 /** Within these the concrete deck's formulas hold. Source: AASHTO LRFD, 9th ed., Tables 4.6.2.2.2b-1, 4.6.2.2.2d-1. */
 export const RANGES = {

@@ -106,30 +106,30 @@ export const shearRoot = formula("q", "sqrt(5 * E / Fy)", "-", "6.10.9.3.2", ["E
 /** Live-load deflection, all lanes shared equally. Source: AASHTO LRFD, 9th ed., Art. 2.5.2.6.2, 3.6.1.3.2. */
 export const sharedDeflection = formula(
   "delta",
-  "1728 * m * NL * Y / (Nb * E * I)",
+  "1728 * m * NL * Y / (Nb * E * Id)",
   "in",
   "2.5.2.6.2",
-  ["m", "NL", "Y", "Nb", "E", "I"],
-  (m: number, NL: number, Y: number, Nb: number, E: number, I: number) => (1728 * m * NL * Y) / (Nb * E * I),
+  ["m", "NL", "Y", "Nb", "E", "Id"],
+  (m: number, NL: number, Y: number, Nb: number, E: number, Id: number) => (1728 * m * NL * Y) / (Nb * E * Id),
 );
 export const stringerDeflection = formula(
   "delta",
-  "1728 * g * Y / (E * I)",
+  "1728 * g * Y / (E * Id)",
   "in",
   "2.5.2.6.2",
-  ["g", "Y", "E", "I"],
-  (g: number, Y: number, E: number, I: number) => (1728 * g * Y) / (E * I),
+  ["g", "Y", "E", "Id"],
+  (g: number, Y: number, E: number, Id: number) => (1728 * g * Y) / (E * Id),
 );
-export const allowedDeflection = formula("dall", "12 * L / k", "in", "2.5.2.6.2", ["L", "k"], (L: number, k: number) => (12 * L) / k);
+export const allowedDeflection = formula("dall", "12 * L / ko", "in", "2.5.2.6.2", ["L", "ko"], (L: number, ko: number) => (12 * L) / ko);
 
 /** Stress range of the fatigue truck, 15 % dynamic allowance. Source: AASHTO LRFD, 9th ed., Art. 3.6.1.4, 6.6.1.2.2. */
 export const fatigueRange = formula(
   "fsr",
-  "12 * gamma * MT * 1.15 * gf / S",
+  "12 * gamma * MT * 1.15 * gf / Sf",
   "ksi",
   "6.6.1.2.2",
-  ["gamma", "MT", "gf", "S"],
-  (gamma: number, MT: number, gf: number, S: number) => (12 * gamma * MT * 1.15 * gf) / S,
+  ["gamma", "MT", "gf", "Sf"],
+  (gamma: number, MT: number, gf: number, Sf: number) => (12 * gamma * MT * 1.15 * gf) / Sf,
 );
 
 /** Pour moments. Source: AASHTO LRFD, 9th ed., Art. 3.4.2.1. */

@@ -67,7 +67,7 @@ export abstract class LrfdStringers extends StringerAssessor {
 
   constructor(design: Design, layout: Layout) {
     const { bridge } = design;
-    super(bridge, layout);
+    super(design, layout);
     this.design = design;
     const { deck } = bridge;
     const concrete = deck.kind === "concrete" && deck.fcKsi !== null && deck.thicknessIn !== null;

@@ -90,7 +90,9 @@ describe("a web that is not compact", () => {
     expect(checkOf(stringer, "flexure")).toMatchObject({ capacity: 50, unit: "ksi", article: "6.10.7.2" });
     // Both are written down under the heading of flexure, the bottom one first.
     const from = stringer.lines.findIndex((line) => line.type === "topic" && line.topic === "flexure");
-    const written = stringer.lines.slice(from).flatMap((line) => (line.type === "step" && /^f[bt]u?$/.test(line.formula.symbol) ? [line.result] : []));
+    const written = stringer.lines
+      .slice(from)
+      .flatMap((line) => (line.type === "step" && /^f[bt]u?$/.test(line.formula.symbol) ? [line.result] : []));
     expect(written[0]).toBeCloseTo(stresses[0], 8);
     expect(written[1]).toBeCloseTo(stresses[1], 8);
     expect(checkOf(stringer, "web-slenderness")).toMatchObject({ capacity: 150, article: "6.10.2.1.1" });

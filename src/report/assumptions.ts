@@ -148,7 +148,7 @@ function lrfdAssumptions(bridge: Bridge): string[] {
 function compositeAssumptions({ deck }: Bridge): string[] {
   const ratio = deck.modularRatio === null ? "by the specification" : `${shown(deck.modularRatio)} as given`;
   return [
-    `Composite: unshored, slab of f'c ${shown(deck.fcKsi ?? 0)} ksi less ${shown(deck.sacrificialIn)} in, haunch ${shown(deck.haunchSectionIn)} in in section properties, modular ratio ${ratio}, three times it for lasting load; the whole slab counts even if the axis lies in it (within about 1 %); reinforcement left out.`,
+    `Composite: unshored, slab of f'c ${shown(deck.fcKsi ?? 0)} ksi less ${shown(deck.sacrificialIn)} in, haunch ${shown(deck.haunchSectionIn)} in in section properties, modular ratio ${ratio}, three times it for lasting load; the whole slab counts in elastic properties even if the axis lies in it (check prints what that overstates: about 1 % as a rule, more on short spans); reinforcement left out.`,
   ];
 }
 

@@ -113,3 +113,25 @@ export function transformed(
 export function topStressKsi(momentKipFt: number, topIn3: number): number {
   return topIn3 > 0 ? (12 * momentKipFt) / topIn3 : 0;
 }
+
+/**
+ * How much the whole slab overstates the section modulus at the bottom of the steel when the neutral axis lies in the slab.
+ *
+ * The slab below the axis is in tension. Its part is found anew with the compressed depth alone: its first moment balances that of the
+ * steel, so a depth c solves be c^2 / (2 n) = A (d / 2 + th + ts - c) measured from the top of the slab.
+ *
+ * @param n modular ratio; > 0
+ * @returns 0 when the axis lies below the slab; else the overstated part, such as 0.04 for 4 %
+ * Source: statics.
+ */
+export function slabTensionShare(shape: ShapeFigures, slab: Slab, n: number, whole: TransformedSection): number {
+  const { areaIn2: A, depthIn: d, inertiaXIn4: Ix } = shape;
+  const { widthIn: be, thicknessIn: ts, haunchIn: th } = slab;
+  if (whole.axisIn <= d + th) return 0;
+  const steelBelowTop = d / 2 + th + ts;
+  const width = be / n;
+  const c = (-A + Math.sqrt(A * A + 2 * width * A * steelBelowTop)) / width;
+  const inertia = Ix + A * (steelBelowTop - c) ** 2 + (width * c ** 3) / 3;
+  const bottom = inertia / (d + th + ts - c);
+  return whole.bottomIn3 / bottom - 1;
+}

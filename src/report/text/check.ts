@@ -92,6 +92,10 @@ export function noteText({ code, args }: Note): string {
       return `Fatigue: ${args[0]}.`;
     case "brackets-not-covered":
       return "Deck pour: lateral bending by overhang brackets is not covered (pour.lateralBendingKsi 0).";
+    case "deck-without-sacrificial":
+      return `Deck: ${shown(Number(args[0]))} in without its sacrificial part; 9.7.1.1 asks for ${args[1]} in so counted, unless the owner approves.`;
+    case "slab-in-tension":
+      return `The neutral axis for live load lies in the slab: with its tensile part left out the section modulus at the bottom would be ${Number(args[0]).toFixed(1)} % less.`;
     case "outside-flexure-rules":
       return `Outside the flexure rules: bf/2tf ${shown(Number(args[0]))}, D/tw ${shown(Number(args[1]))}; no capacity is counted.`;
     default:

@@ -1,7 +1,7 @@
 import type { Layout } from "../../bridge/layouts.js";
 import type { Steel } from "../../bridge/yield-stress.js";
 import type { Shape } from "../../catalogue/shape.js";
-import { newTransformedSection, type Slab, topStressKsi, transformed } from "../../section/composite.js";
+import { newTransformedSection, type Slab, slabTensionShare, topStressKsi, transformed } from "../../section/composite.js";
 import { newPlasticSection, plasticMoment, slabForce, steelForce } from "../../section/plastic-moment.js";
 import { IN_PER_FT } from "../../units.js";
 import type { AssessmentRecorder, Design } from "../contract.js";
@@ -68,6 +68,9 @@ export class CompositeStringers extends LfdStringers {
     this.#slab.widthIn = this.#effectiveWidthIn(index, shape, recorder);
     transformed(shape, this.#slab, 3 * this.#n, "3n", this.#long, recorder);
     transformed(shape, this.#slab, this.#n, "n", this.#short, recorder);
+    if (recorder === null) return;
+    const overstated = slabTensionShare(shape, this.#slab, this.#n, this.#short);
+    if (overstated > 0) recorder.note("slab-in-tension", 100 * overstated);
   }
 
   /** Source: AASHTO Standard Specifications, 17th ed., Art. 10.38.3. */
@@ -118,7 +121,7 @@ export class CompositeStringers extends LfdStringers {
     if (Dp > DUCTILITY_LIMIT * Dpr || lwAll > NONCOMPACT_WEB_LIMIT) capacity = 0;
     recorder?.note("composite-route", compact ? (Dp > Dpr ? "reduced" : "plastic") : "first-yield", plastic.place);
     this.check(index, "flexure", this.effects.Mu, capacity, "kip-ft", "10.50.1.1", recorder);
-    if (compact) this.check(index, "web-slenderness", lw, lwp, "-", "10.50.1.1.2", recorder);
+    if (compact && lwAll <= NONCOMPACT_WEB_LIMIT) this.check(index, "web-slenderness", lw, lwp, "-", "10.50.1.1.2", recorder);
     else this.check(index, "web-slenderness", lwAll, NONCOMPACT_WEB_LIMIT, "-", "10.50.1.2", recorder);
     this.check(index, "bracing", 0, this.diaphragmsIn, "in", "10.50", recorder);
     this.check(index, "ductility", Dp, DUCTILITY_LIMIT * Dpr, "in", "10.50.1.1.2", recorder);

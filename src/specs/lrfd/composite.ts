@@ -1,7 +1,7 @@
 import type { Layout } from "../../bridge/layouts.js";
 import type { Steel } from "../../bridge/yield-stress.js";
 import { renamed } from "../../formula.js";
-import { newTransformedSection, topStressKsi, transformed } from "../../section/composite.js";
+import { newTransformedSection, slabTensionShare, topStressKsi, transformed } from "../../section/composite.js";
 import { newPlasticSection, plasticMoment, slabForce, steelForce } from "../../section/plastic-moment.js";
 import { STEEL_MODULUS_KSI } from "../../units.js";
 import type { AssessmentRecorder, Design } from "../contract.js";
@@ -68,6 +68,9 @@ export class CompositeLrfdStringers extends LrfdStringers {
     recorder?.step(rules.effectiveWidth, this.#slab.widthIn, tributaryFt);
     transformed(shape, this.#slab, 3 * this.n, "3n", this.#long, recorder);
     transformed(shape, this.#slab, this.n, "n", this.#short, recorder);
+    if (recorder === null) return;
+    const overstated = slabTensionShare(shape, this.#slab, this.n, this.#short);
+    if (overstated > 0) recorder.note("slab-in-tension", 100 * overstated);
   }
 
   /** Source: AASHTO LRFD, 9th ed., Art. 6.10.6.2, 6.10.7. */

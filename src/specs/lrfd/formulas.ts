@@ -192,7 +192,7 @@ export const leastSteelDepth = formula("dmin", "12 * 0.033 * L", "in", "2.5.2.6.
 export const leastWholeDepth = formula("hmin", "12 * 0.040 * L", "in", "2.5.2.6.3", ["L"], (L: number) => 12 * 0.04 * L);
 /** Flange that can be handled. Source: AASHTO LRFD, 9th ed., Art. C6.10.2.2. */
 export const leastFlangeWidth = formula("bmin", "12 * L / 85", "in", "C6.10.2.2", ["L"], (L: number) => (12 * L) / 85);
-/** Least concrete deck, in. Source: AASHTO LRFD, 9th ed., Art. 9.7.1.1. */
+/** Least concrete deck, in; the article leaves a sacrificial surface out. Source: AASHTO LRFD, 9th ed., Art. 9.7.1.1. */
 export const LEAST_DECK_IN = 7;
 
 /** Studs by strength. Source: AASHTO LRFD, 9th ed., Art. 6.10.10.4. */

@@ -26,6 +26,8 @@ import * as rules from "./formulas.js";
 const E = STEEL_MODULUS_KSI;
 /** Trucks side by side tried for one interior stringer when nobody said how wide the bridge is. */
 const TRUCKS_ON_UNKNOWN_WIDTH = 4;
+/** Fewest stringers for which the distribution formulas were made. Source: AASHTO LRFD, 9th ed., Table 4.6.2.2.2b-1. */
+const FEWEST_STRINGERS = 4;
 /** The fatigue truck: the design truck with its rear axles 30 ft apart. Source: AASHTO LRFD, 9th ed., Art. 3.6.1.4.1. */
 const FATIGUE_TRUCK = { name: "fatigue truck", axlesKip: [8, 32, 32], spacingsFt: [14, 30] };
 
@@ -300,8 +302,12 @@ export abstract class LrfdStringers extends StringerAssessor {
     recorder?.step(rules.leastFlangeWidth, bmin, L);
     this.check(index, "handling", bmin, shape.flangeWidthIn, "in", "C6.10.2.2", recorder);
     this.adviseLayout(index, bridge, shape, recorder);
+    const { count } = this.layout;
+    if (count !== null && count < FEWEST_STRINGERS)
+      this.check(index, "layout", FEWEST_STRINGERS, count, "-", "4.6.2.2.2b, Nb >= 4", recorder);
     if (bridge.deck.kind === "concrete" && bridge.deck.thicknessIn !== null) {
       this.check(index, "deck-thickness", rules.LEAST_DECK_IN, bridge.deck.thicknessIn, "in", "9.7.1.1", recorder);
+      if (this.ts < rules.LEAST_DECK_IN) recorder?.note("deck-without-sacrificial", this.ts, rules.LEAST_DECK_IN);
     }
   }
 

@@ -58,9 +58,17 @@ export function requirePositive(name: string, value: number): void {
  * @throws {RangeError} naming the first number that is NaN or infinite, by its path
  */
 export function requireFinite(name: string, value: unknown): void {
-  if (typeof value === "number") {
-    if (!Number.isFinite(value)) throw new RangeError(`${name} must be finite, got ${value}`);
-  } else if (typeof value === "object" && value !== null) {
-    for (const [key, inner] of Object.entries(value)) requireFinite(`${name}.${key}`, inner);
+  const path = notFinite(value);
+  if (path !== null) throw new RangeError(`${name}${path} must be finite`);
+}
+
+/** Path to the first number that is not finite, or null. */
+function notFinite(value: unknown): string | null {
+  if (typeof value === "number") return Number.isFinite(value) ? null : ` (${value})`;
+  if (typeof value !== "object" || value === null) return null;
+  for (const key in value) {
+    const path = notFinite((value as Record<string, unknown>)[key]);
+    if (path !== null) return `.${key}${path}`;
   }
+  return null;
 }

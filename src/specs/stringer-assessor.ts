@@ -89,9 +89,7 @@ export abstract class StringerAssessor implements Assessor {
   /** @throws {RangeError} if a number of bridge, live load or layout is not finite */
   constructor(design: Design, layout: Layout) {
     const { bridge } = design;
-    requireFinite("bridge", bridge);
-    requireFinite("vehicle", design.vehicle);
-    requireFinite("live", design.live);
+    requireSound(design);
     requireFinite("layout", layout);
     this.layout = layout;
     this.positions = positionsOf(layout.count);
@@ -205,6 +203,17 @@ export abstract class StringerAssessor implements Assessor {
     this.governingSlot = failing >= 0 ? failing : worst;
     this.governingRatio = failing >= 0 ? failingRatio : worstRatio;
   }
+}
+
+/** Designs whose numbers were found finite: each is looked through once, not once a layout. */
+const sound = new WeakSet<Design>();
+
+function requireSound(design: Design): void {
+  if (sound.has(design)) return;
+  requireFinite("bridge", design.bridge);
+  requireFinite("vehicle", design.vehicle);
+  requireFinite("live load", design.live);
+  sound.add(design);
 }
 
 /** Whether every figure of a shape is finite: what is not makes the sum of all NaN or infinite. */

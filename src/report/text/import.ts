@@ -35,6 +35,7 @@ export function importText(
     `Cells apart by ${separator}, decimals by ${decimals}, ${reading.encoding.encoding}; header on line ${reading.layout.headerLine}.`,
     "",
     ...columnLines(summary),
+    ...unreadLines(summary),
     ...section("Refused", summary.refused, refusedCount, ({ line, reason }) => `line ${line}: ${reason}`),
     ...section("Warnings (accepted all the same)", summary.warnings, warningCount, ({ line, message }) => `line ${line}: ${message}`),
     ...remarkLines(summary),
@@ -70,6 +71,15 @@ function columnLines({ reading, derived }: ImportSummary): string[] {
   if (whole.length === 0) return lines;
   const names = whole.map(([field, count]) => `${SYMBOLS[field as keyof typeof SYMBOLS]} (${count})`).join(", ");
   return [...lines, "", ...wrap(`Derived, rows in brackets: ${names}.`, WIDTH, "")];
+}
+
+function unreadLines({ reading: { layout, nameAt } }: ImportSummary): string[] {
+  const headers = layout.columns
+    .filter(({ meanings, header, index }) => meanings.length === 0 && header !== "" && index !== nameAt)
+    .map(({ header }) => header);
+  return headers.length === 0
+    ? []
+    : ["", ...wrap(`Not read: ${headers.slice(0, 30).join(", ")}${headers.length > 30 ? " ..." : ""}.`, WIDTH, "")];
 }
 
 function section<T>(title: string, items: readonly T[], count: number, words: (item: T) => string): string[] {

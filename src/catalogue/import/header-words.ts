@@ -74,7 +74,7 @@ const WORDS: readonly (readonly [Field | readonly Field[], string])[] = [
   ["yearBuilt", "year yearbuilt built yearofconstruction baujahr builtin yearrolled yearinstalled"],
   [
     "quantity",
-    "qty quantity pcs pieces count onhand quantityonhand qtyonhand stuck stueck stk anzahl nombre cantidad numberofpieces noofpieces numberonhand available",
+    "qty quantity pcs pieces count onhand quantityonhand qtyonhand stuck stueck stk anzahl menge nombre cantidad numberofpieces noofpieces numberonhand available",
   ],
   [
     "usableLengthFt",

@@ -30,11 +30,13 @@ export interface Settled {
 
 /** How far the middle of a column's figures may lie from what the dimensions make of them, as a fraction. */
 const FIT = 0.12;
-const FIT_ROUGH: Partial<Record<Property, number>> = { torsionJIn4: 0.18, warpingCwIn6: 0.15 };
+const FIT_OF: Partial<Record<Property, number>> = { areaIn2: 0.08, weightPlf: 0.08, torsionJIn4: 0.18, warpingCwIn6: 0.15 };
 /** The same where a column may hold one of several properties, and by how much the next must be farther off. */
 const FIT_OF_SEVERAL = 0.06;
 const APART = 0.04;
 const READINGS = 4096;
+/** A difference in fit, as a fraction, that settles which of two like columns is read. */
+const CLOSER = 0.003;
 /** Rows below which a column that fits nothing is not called misunderstood, if its header says all. */
 const FEW = 5;
 
@@ -56,6 +58,8 @@ interface Reading {
   readonly unread: readonly SampledColumn[];
   readonly faults: readonly InputIssue[];
   readonly score: number;
+  /** How far the properties lie from what the dimensions make of them, as a fraction: the mean over the columns of their middle rows. */
+  readonly off: number;
 }
 
 /** What the sample is read with. */
@@ -102,8 +106,22 @@ function bestOf(readings: readonly Reading[]): Reading | null {
 }
 
 function better(a: Reading, b: Reading): boolean {
-  const order = [a.faults.length - b.faults.length, b.score - a.score, awkwardness(a) - awkwardness(b)];
+  // Of two depths, one nominal, the one with decimals, or that the properties follow from.
+  const closer = Math.abs(a.off - b.off) > CLOSER ? a.off - b.off : 0;
+  const order = [
+    a.faults.length - b.faults.length,
+    b.score - a.score,
+    coarseness(a) - coarseness(b),
+    closer,
+    awkwardness(a) - awkwardness(b),
+  ];
   return (order.find((difference) => difference !== 0) ?? 0) < 0;
+}
+
+/** Dimensions read from columns of whole numbers, as nominal depths are. */
+function coarseness({ dimensions }: Reading): number {
+  return DIMENSIONS.filter((field) => dimensions[field].column.figures.every((figure) => Number.isNaN(figure) || Number.isInteger(figure)))
+    .length;
 }
 
 /** Of readings with the same figures: decimals before fractions, columns that stand together, those to the left. */
@@ -179,12 +197,15 @@ function follow(input: SettleInput, columns: readonly SampledColumn[], units: re
   const twins: SettledColumn[] = [];
   const unread: SampledColumn[] = [];
   const misfits: { column: SampledColumn; fits: readonly Unit[] }[] = [];
+  const offs: number[] = [];
   let score = 0;
   for (const column of input.columns) {
     if (taken.has(column) || column.figures.every((figure) => Number.isNaN(figure))) continue;
     const found = explain(column, expected, input.system);
     if (found !== null) {
       score++;
+      const off = isProperty(found.field) ? offMiddle(column, found.field, found.unit, expected) : Number.NaN;
+      if (!Number.isNaN(off)) offs.push(off);
       if (properties.some(({ field }) => field === found.field)) twins.push(found);
       else properties.push(found);
       continue;
@@ -224,6 +245,7 @@ function follow(input: SettleInput, columns: readonly SampledColumn[], units: re
     unread,
     faults,
     score,
+    off: offs.length === 0 ? 0 : offs.reduce((sum, off) => sum + off, 0) / offs.length,
   };
 }
 
@@ -321,7 +343,7 @@ function explain(
   if (first === undefined || Number.isNaN(first.off)) return null;
   if (column.unitForced && fields.length === 1) return settled(column, first.field, first.unit);
   const several = fields.length > 1;
-  if (!(first.off <= (several ? FIT_OF_SEVERAL : (FIT_ROUGH[first.field] ?? FIT)))) return null;
+  if (!(first.off <= (several ? FIT_OF_SEVERAL : (FIT_OF[first.field] ?? FIT)))) return null;
   if (second !== undefined && second.off - first.off < APART) return null;
   return settled(column, first.field, first.unit);
 }
@@ -405,8 +427,8 @@ function misfit({ file, headerLine }: SettleInput, column: SampledColumn, fits: 
       allowed: `--map ${field}="${column.header}", or --map unread="${column.header}" to leave it aside`,
     };
   }
-  const said = column.unit === null ? "no unit tried fits" : `its unit says ${column.unit.name}, and that does not fit`;
-  const instead = fits.length === 0 ? "" : `; they would fit ${fits.map(({ name }) => name).join(" or ")}`;
+  const said = column.unit === null ? "no unit fits closely" : `its unit says ${column.unit.name}, and that does not fit`;
+  const instead = fits.length === 0 ? "" : `; roughly they would fit ${fits.map(({ name }) => name).join(" or ")}`;
   const unit = fits[0]?.name ?? "UNIT";
   return {
     file,

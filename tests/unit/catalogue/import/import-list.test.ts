@@ -163,6 +163,20 @@ describe("judgement on each row", () => {
     }
   });
 
+  it("letters for noughts, another list's decimal sign and a figure in a unit of something else are refused with the cell", async () => {
+    const text = new TextDecoder()
+      .decode(bytesOf("units-row.csv"))
+      .replace(",0.625,", ",O.625,")
+      .replace(",32.9,", ',"32,9",')
+      .replace(",29.7,", ",29.7 lb/ft,");
+    const { summary } = await importList(text, "letters.csv");
+    expect(summary.refused).toEqual([
+      { line: 3, reason: expect.stringContaining('tw "O.625" is not a number') },
+      { line: 4, reason: expect.stringContaining('d "32,9" is not a number') },
+      { line: 5, reason: expect.stringContaining('d "29.7 lb/ft" is not a number alone') },
+    ]);
+  });
+
   it("a figure a little off is warned of and taken as given", async () => {
     const { summary, shapes } = await imported("near-off.csv");
     expect(summary.warnings).toEqual([{ line: 4, message: expect.stringContaining("Zx 322 should be about 313.9") }]);

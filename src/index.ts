@@ -12,6 +12,7 @@ export { type Layout, layoutsOf } from "./bridge/layouts.js";
 export { type ResolveOptions, resolveBridge } from "./bridge/resolve.js";
 export { gradeShapes, type Steel, yieldStress } from "./bridge/yield-stress.js";
 export { propertiesFromDimensions, type RolledDimensions } from "./catalogue/from-dimensions.js";
+export { type ImportedList, type ImportSummary, importList } from "./catalogue/import/import-list.js";
 export { mergeLists } from "./catalogue/merge-lists.js";
 export { readShapes, type ShapeList } from "./catalogue/read-shapes.js";
 export type { Shape, ShapeFigures } from "./catalogue/shape.js";

@@ -29,7 +29,7 @@ export function check(prepared: Prepared, designation: string): CheckAnswer {
     throw new InputError([
       {
         field: steel.shape.designation,
-        problem: `its flange is wider than twice the overhang of every layout (${overhangs(prepared, steel)})`,
+        problem: `its flange is wider than the spacing or twice the overhang of every layout (overhangs ${overhangs(prepared, steel)})`,
         allowed: "a smaller spacing, fewer stringers or a wider deck",
       },
     ]);

@@ -124,7 +124,7 @@ function refuseImpossible(bridge: Bridge, { layouts }: Layouts, steels: readonly
     throw new InputError([
       {
         field: "stringers.spacingFt",
-        problem: `${count} stringers at ${spacingFt} ft on a deck ${bridge.deck.outToOutFt} ft wide leave an overhang of ${layout.overhangFt} ft, less than half a flange`,
+        problem: `${count} stringers at ${spacingFt} ft on a deck ${bridge.deck.outToOutFt} ft wide leave an overhang of ${layout.overhangFt} ft: less than half a flange, or flanges overlap`,
         allowed: "fewer stringers, a smaller spacing or a wider deck",
       },
     ]);

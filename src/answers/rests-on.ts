@@ -1,4 +1,5 @@
 import type { Bridge } from "../bridge/bridge.js";
+import type { Steel } from "../bridge/yield-stress.js";
 import { type Option, rank } from "../ranking/rank.js";
 import { type Assessment, assessInFull } from "./assessment.js";
 import type { Prepared } from "./question.js";
@@ -33,19 +34,20 @@ const HEAVY_TRAFFIC_ADTT = 5000;
 
 /** Each assumption that the user did not state, flipped to its plausible other; only those that change the shape or fail it. */
 export function restsOn(prepared: Prepared, answer: Option): readonly RestsOn[] {
-  return flips(prepared.bridge).flatMap((flip) => {
+  return flips(prepared.bridge, answer.steel).flatMap((flip) => {
     const found = flipped(prepared, answer, flip);
     return found === null ? [] : [found];
   });
 }
 
-function flips(bridge: Bridge): Flip[] {
+function flips(bridge: Bridge, { shape }: Steel): Flip[] {
   const unstated = (key: string): boolean => bridge.sources[key] === "practice";
   const list: Flip[] = [];
   if (unstated("barriers.baseFt") && bridge.roadwayFt !== null && bridge.barriers.baseFt !== NARROW_CURB_FT) {
     list.push({ key: "barriers.baseFt", flippedTo: NARROW_CURB_FT, changes: { "barriers.baseFt": NARROW_CURB_FT } });
   }
-  if (unstated("steel.grade") && unstated("steel.fyKsi") && bridge.steel.grade !== "36") {
+  const ownSteel = shape.yieldStressKsi !== null || typeof shape.stock?.yearBuilt === "number";
+  if (!ownSteel && unstated("steel.grade") && unstated("steel.fyKsi") && bridge.steel.grade !== "36") {
     list.push({ key: "steel.grade", flippedTo: "36", changes: { "steel.grade": "36" } });
   }
   if (unstated("liveLoad.adtt")) {
@@ -54,7 +56,7 @@ function flips(bridge: Bridge): Flip[] {
     const other = adtt === null || adtt > light ? light : HEAVY_TRAFFIC_ADTT;
     list.push({ key: "liveLoad.adtt", flippedTo: other, changes: { "liveLoad.adtt": other } });
   }
-  if (unstated("bracing.topFlange")) {
+  if (unstated("bracing.topFlange") && !bridge.deck.composite) {
     const other = bridge.bracing.topFlange === "held" ? "diaphragms" : "held";
     list.push({ key: "bracing.topFlange", flippedTo: other, changes: { "bracing.topFlange": other } });
   }

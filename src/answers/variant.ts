@@ -1,5 +1,6 @@
 import type { Layout } from "../bridge/layouts.js";
 import type { Steel } from "../bridge/yield-stress.js";
+import type { Shape } from "../catalogue/shape.js";
 import { InputError } from "../errors.js";
 import { type Option, rank } from "../ranking/rank.js";
 import { stands } from "../search/search.js";
@@ -13,11 +14,16 @@ export type Changes = Readonly<Record<string, unknown>>;
 export function prepareVariant(question: Question, changes: Changes, steel: Steel | null): Prepared | null {
   try {
     const varied = question.vary(changes);
-    return prepare(steel === null ? varied : { ...varied, shapes: [steel.shape] });
+    return prepare(steel === null ? varied : { ...varied, shapes: [asListed(question, steel)] });
   } catch (error) {
     if (error instanceof InputError) return null;
     throw error;
   }
+}
+
+/** The shape as its list gives it: what it has lost is taken off anew when the variant is prepared. */
+function asListed({ shapes }: Question, { shape }: Steel): Shape {
+  return shapes.find(({ designation }) => designation === shape.designation) ?? shape;
 }
 
 /** One shape on one layout of a changed bridge, as `check` would answer it; null when that cannot be. */

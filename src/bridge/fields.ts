@@ -126,7 +126,7 @@ export const FIELDS: Readonly<Record<string, Field>> = {
   "liveLoad.lanes": number({ min: 1, max: 19, integer: true, nullable: true }),
   "liveLoad.adtt": number({ min: 0, max: 50000, unit: "trucks a day", nullable: true }),
   "liveLoad.fatigueDetail": choice([...new Set([...LFD_FATIGUE_DETAILS, ...LRFD_FATIGUE_DETAILS])], true),
-  "liveLoad.distribution": number({ min: 0.05, max: 10, unit: "wheel lines per stringer", nullable: true }),
+  "liveLoad.distribution": number({ min: 0.05, max: 10, unit: "wheel lines (lfd) or lanes (lrfd) per stringer", nullable: true }),
   "deadLoad.stage1Klf": number({ min: 0, max: 20, unit: "kip/ft", nullable: true }),
   "deadLoad.stage2Klf": number({ min: 0, max: 20, unit: "kip/ft", nullable: true }),
   "deadLoad.wearingKlf": number({ min: 0, max: 20, unit: "kip/ft", nullable: true }),

@@ -105,6 +105,8 @@ function merge(layers: readonly Layer[]): Merged {
   layers.forEach((layer, index) => {
     for (const [key, value] of layer.values) {
       if (DECK_BOUND.includes(key) && kindAt[index] !== kind) continue;
+      // A null over a null says nothing new: the rule behind it stays the practice's.
+      if (value === null && values.get(key) === null) continue;
       values.set(key, value);
       from.set(key, layer);
     }

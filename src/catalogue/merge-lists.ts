@@ -21,10 +21,11 @@ export function mergeLists(lists: readonly (readonly Shape[])[]): readonly Shape
     const differing = COLUMNS.filter(({ name }) => first[name] !== shape[name]).map(
       ({ name }) => `${name} ${first[name]} and ${shape[name]}`,
     );
-    if (first.yieldStressKsi !== shape.yieldStressKsi) {
+    if (first.yieldStressKsi !== shape.yieldStressKsi && !shape.bundled && !first.bundled) {
       differing.push(`yieldStressKsi ${first.yieldStressKsi ?? "not given"} and ${shape.yieldStressKsi ?? "not given"}`);
     }
-    if (JSON.stringify(first.stock) !== JSON.stringify(shape.stock)) differing.push("other stock");
+    const bothInStock = first.stock !== null && shape.stock !== null;
+    if (bothInStock && JSON.stringify(first.stock) !== JSON.stringify(shape.stock)) differing.push("other stock");
     if (differing.length > 0) {
       issues.push({
         file: shape.source.file,

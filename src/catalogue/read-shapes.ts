@@ -72,7 +72,13 @@ function placeColumns(header: CsvRow, file: string): { places: ReadonlyMap<strin
   });
   for (const name of REQUIRED_COLUMNS) {
     if (!places.has(name)) {
-      issues.push({ file, line: header.line, field: name, problem: "this column is missing", allowed: REQUIRED_COLUMNS.join(", ") });
+      issues.push({
+        file,
+        line: header.line,
+        field: name,
+        problem: "this column is missing",
+        allowed: `${REQUIRED_COLUMNS.join(", ")}; leanspan import turns any other list into one`,
+      });
     }
   }
   if (issues.length > 0) throw new InputError(issues);

@@ -26,7 +26,8 @@ export async function runInit(path: string, flags: Flags, io: Io): Promise<ExitC
 
 /** Fills in what no practice gives: title, span and width. */
 function withExamples(flags: Flags): Flags {
-  const titled = (flags.set ?? []).some((setting) => setting.startsWith("title="));
+  const titled =
+    (flags.set ?? []).some((setting) => setting.startsWith("title=")) || (flags.span !== undefined && flags.width !== undefined);
   return {
     ...flags,
     span: flags.span ?? [EXAMPLE.span],

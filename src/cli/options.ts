@@ -60,7 +60,7 @@ export function addBridgeFlags(command: Command): Command {
     .addOption(list("--bridge <file>", "bridge file (JSON)"))
     .addOption(list("--practice <file>", "an agency's defaults and limits, over the shipped ones"))
     .addOption(list("--vehicles <file>", "vehicles of your own (JSON), added to the known ones"))
-    .addOption(list("--spec <name>", "specification: lfd"))
+    .addOption(list("--spec <name>", "specification: lrfd or lfd"))
     .addOption(list("--span <ft>", `span between bearings, such as 62.5 or 62'-6"`))
     .addOption(list("--vehicle <name>", "live load, such as HS20-44"))
     .addOption(list("--set <key=value>", "any key of the bridge file; repeatable"));

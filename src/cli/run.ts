@@ -94,7 +94,7 @@ function build(io: Io, done: (code: ExitCode) => void): Command {
     done(await (await import("./import.js")).runImport(file, flags, io)),
   );
 
-  const init = add("init", "a starting bridge file with every key", [
+  const init = add("init", "a starting bridge file with every key; what it gives counts as said", [
     "init otter-creek.json --span 62 --width 30 --force",
     "init forest-road.json --span 40 --width 16 --spec lfd --vehicle H15-44 --force",
   ]).argument("<file>", "file to be written");

@@ -11,7 +11,7 @@ export const deckByThickness = formula(
   "wdeck",
   "t / 12 * T * gamma / 1000",
   "kip/ft",
-  "3.3.6",
+  "3.3.6; LRFD 3.5.1",
   ["t", "T", "gamma"],
   (t: number, T: number, gamma: number) => ((t / 12) * T * gamma) / 1000,
 );
@@ -22,7 +22,7 @@ export const haunchWeight = formula(
   "whaunch",
   "bf * thw / 144 * 0.150",
   "kip/ft",
-  "3.3.6",
+  "3.3.6; LRFD 3.5.1",
   ["bf", "thw"],
   (bf: number, thw: number) => ((bf * thw) / IN2_PER_FT2) * CONCRETE_KCF,
 );
@@ -63,7 +63,14 @@ export const stage1Given = formula(
   (wgiven: number, wsteel: number) => wgiven + wsteel,
 );
 /** Both barriers shared by all stringers. Source: AASHTO Standard Specifications, 17th ed., Art. 3.23.2.3.1.1. */
-export const barrierShare = formula("w2", "2 * wb / Nb", "kip/ft", "3.23.2.3.1.1", ["wb", "Nb"], (wb: number, Nb: number) => (2 * wb) / Nb);
+export const barrierShare = formula(
+  "w2",
+  "2 * wb / Nb",
+  "kip/ft",
+  "3.23.2.3.1.1; LRFD 4.6.2.2.1",
+  ["wb", "Nb"],
+  (wb: number, Nb: number) => (2 * wb) / Nb,
+);
 /** A quarter of both barriers, for one interior stringer of unknown neighbours. Source: common practice. */
 export const barrierQuarter = formula("w2", "2 * wb / 4", "kip/ft", "common practice", ["wb"], (wb: number) => (2 * wb) / 4);
 /** Wearing surface shared by all stringers. Source: AASHTO Standard Specifications, 17th ed., Art. 3.23.2.3.1.1. */
@@ -71,7 +78,7 @@ export const wearingShare = formula(
   "ww",
   "pw * wr / Nb / 1000",
   "kip/ft",
-  "3.23.2.3.1.1",
+  "3.23.2.3.1.1; LRFD 4.6.2.2.1",
   ["pw", "wr", "Nb"],
   (pw: number, wr: number, Nb: number) => (pw * wr) / Nb / 1000,
 );

@@ -13,19 +13,21 @@ export interface Option extends Ranked {
 /**
  * The best options that pass, at most one per count and shape, in the total order.
  *
- * Groups are pulled by rising measure, and of equal ones by count; once enough options stand after a whole group,
- * no candidate left can come before them, so nothing skipped can change the answer.
+ * Groups are pulled by rising measure, the first key of the order; once enough options stand when the measure rises, no candidate left can
+ * come before them, so nothing skipped can change the answer.
  *
  * @param space layouts and shapes
  * @param top options wanted, 1 or more
  */
 export function rank(space: SearchSpace, top: number): readonly Option[] {
   const options: Option[] = [];
+  let measurePerFt = 0;
   for (const group of groupsOf(space)) {
-    if (options.length >= top) break;
-    options.push(...passingOf(group).sort(byPreference));
+    if (group.measurePerFt !== measurePerFt && options.length >= top) break;
+    measurePerFt = group.measurePerFt;
+    options.push(...passingOf(group));
   }
-  return options.slice(0, top);
+  return options.sort(byPreference).slice(0, top);
 }
 
 function passingOf(group: Group): Option[] {

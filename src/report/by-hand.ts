@@ -32,7 +32,7 @@ export function byHandLines(
     `wL^2/8 = ${shown(w)} x ${L}^2 / 8 = ${shown(MD)} kip-ft dead moment`,
     effects.distributionPer === "lane"
       ? `Live: ${shown(effects.liveMomentPerLaneKipFt)} kip-ft (${bridge.liveLoad.vehicle}, one lane, dynamic allowance and lane load in it) x ${shown(factor)} lanes = ${shown(ML)} kip-ft`
-      : `Live: ${shown(effects.liveMomentPerLaneKipFt)} kip-ft (${bridge.liveLoad.vehicle} table, one lane) / 2 x ${shown(factor)} wheel lines x ${shown(1 + effects.impact)} impact = ${shown(ML)} kip-ft${lanes}`,
+      : `Live: ${shown(effects.liveMomentPerLaneKipFt)} kip-ft (${bridge.liveLoad.vehicle}, one lane, no impact: a moment table or leanspan loads) / 2 x ${shown(factor)} wheel lines x ${shown(1 + effects.impact)} impact = ${shown(ML)} kip-ft${lanes}`,
     need,
   ];
 

@@ -29,7 +29,7 @@ export function assumptionText({ key, value }: Pick<RestsOn, "key" | "value">): 
     case "steel.grade":
       return `grade ${value} steel`;
     case "liveLoad.adtt":
-      return value === null ? "truck traffic not given, taken as heavy" : `${shown(Number(value))} trucks a day`;
+      return value === null ? "truck traffic not given, taken as heavy" : `${shown(Number(value))} trucks a day (ADTT)`;
     case "bracing.topFlange":
       return flangeText(value);
     case "deflection.use":

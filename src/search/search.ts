@@ -53,9 +53,10 @@ export function groupsOf({ assessors, steels, measure }: SearchSpace): readonly 
   return groups.sort((a, b) => a.measurePerFt - b.measurePerFt || (a.count ?? 1) - (b.count ?? 1));
 }
 
-/** Whether a shape stands under a layout's deck: the outer flange does not reach beyond the edge. */
-export function stands({ overhangFt }: Layout, { shape }: Steel): boolean {
-  return overhangFt === null || overhangFt >= shape.flangeWidthIn / 2 / IN_PER_FT - 1e-9;
+/** Whether a shape stands under a layout's deck: flanges do not overlap, and the outer one does not reach beyond the edge. */
+export function stands({ overhangFt, spacingFt }: Layout, { shape }: Steel): boolean {
+  const widthFt = shape.flangeWidthIn / IN_PER_FT;
+  return spacingFt >= widthFt - 1e-9 && (overhangFt === null || overhangFt >= widthFt / 2 - 1e-9);
 }
 
 /** Whether a candidate can be at all: it stands, and the stock has as many pieces as the layout has stringers. */

@@ -18,7 +18,7 @@ export function newPlasticSection(): PlasticSection {
   return { place: "slab", momentKipFt: 0, depthIn: 0, webInCompressionIn: 0 };
 }
 
-const SOURCE = "10.50.1.1.1, D6.1";
+const SOURCE = "10.50.1.1.1; LRFD D6.1";
 
 /** Greatest force of the slab. Source: AASHTO Standard Specifications, 17th ed., Art. 10.50.1.1.1; LRFD 9th ed., Art. D6.1. */
 export const slabForce = formula(

@@ -171,6 +171,7 @@ describe("sections --against", () => {
   it("the catalogue against itself has nothing to tell", () => {
     const { status, stdout } = leanspan("sections", "--against", join(root, "data", "w-shapes.csv"));
     expect(status).toBe(0);
-    expect(stdout).toContain("289 shapes alike, 0 with other figures");
+    // The head line breaks where the path of the list makes it, so blanks are taken as one.
+    expect(stdout.replace(/\s+/g, " ")).toContain("289 shapes alike, 0 with other figures");
   });
 });

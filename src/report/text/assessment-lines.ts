@@ -79,7 +79,7 @@ function advisoryWords({ id, demand, capacity, unit, article }: Check): string {
     case "lane-step":
       return `the roadway is ${provided} short of carrying one lane more (${article})`;
     case "layout":
-      return `${article}: ${required} against ${provided}, as explicitly given`;
+      return `${article}: ${required} against ${provided}${article.startsWith("practice") ? ", as explicitly given" : ""}`;
     case "distribution-sum":
       return `the factors of all stringers add up to ${provided}, the lanes bring ${required}`;
     case "depth":

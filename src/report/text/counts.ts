@@ -10,7 +10,7 @@ import { table, wrap } from "./table.js";
 /** Why no shape passes at a count, in words; null when one does. */
 export function countReason({ best, nearestMiss }: CountRow): string | null {
   if (best !== null) return null;
-  if (nearestMiss === null) return "no shape is left to try";
+  if (nearestMiss === null) return "no shape can be used: too few pieces on hand, or flanges too wide for the layout";
   return `none passes; nearest ${nearestMiss.shape} at ${feetText(nearestMiss.layout.spacingFt)} ft: ${failingText(nearestMiss)}`;
 }
 

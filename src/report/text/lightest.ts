@@ -27,7 +27,7 @@ export function lightestText(bridge: Bridge, answer: LightestAnswer, inTheWay: I
   else lines.push(...optionTable(answer), ...orderLines(answer), ...ofStock(answer), ...remarks(answer.options[0].assessment));
   if (answer.whyNotLighter !== null) lines.push("", ...whyNotLighterLines(answer.whyNotLighter, answer.rankedBy, style));
   if (answer.byDepth.length > 0)
-    lines.push("", style.strong(answer.rankedBy === "cost" ? "Cheapest by depth" : "Lightest by depth"), ...depthTable(answer.byDepth));
+    lines.push("", style.strong(answer.rankedBy === "cost" ? "Cheapest by depth" : "Lightest by depth"), ...depthTable(answer));
   if (answer.restsOn.length > 0) {
     lines.push("", style.strong("Rests on"), ...answer.restsOn.flatMap((found) => bullet(restsOnText(found, answer.rankedBy))));
   }
@@ -129,23 +129,25 @@ function orderLines({ rankedBy, withoutPrice, options }: LightestAnswer): string
   return wrap(`Ranked by weight, for these that pass have no price: ${withoutPrice.slice(0, LEFT_OUT_SHOWN).join(", ")}.`, WIDTH, "");
 }
 
-function depthTable(rows: readonly DepthRow[]): string[] {
+function depthTable({ byDepth, rankedBy, options }: LightestAnswer): string[] {
+  const extra = ({ assessment, extraPlfOfBridge }: DepthRow): number =>
+    rankedBy === "cost" ? (assessment.costPerFtOfBridge ?? 0) - (options[0].assessment.costPerFtOfBridge ?? 0) : extraPlfOfBridge;
   return table(
     [
       { title: "nominal in", align: "right" },
       { title: "shape", align: "left" },
       { title: "stringers", align: "left" },
       { title: "lb/ft", align: "right" },
-      { title: "extra", align: "right" },
+      { title: rankedBy === "cost" ? "extra cost" : "extra", align: "right" },
       { title: "governed by", align: "left" },
     ],
-    rows.map(({ nominalDepthIn, assessment, extraPlfOfBridge }) => [
-      shown(nominalDepthIn),
-      assessment.shape,
-      layoutText(assessment),
-      shown(assessment.weightPlf),
-      shown(extraPlfOfBridge),
-      shortGoverning(assessment),
+    byDepth.map((row) => [
+      shown(row.nominalDepthIn),
+      row.assessment.shape,
+      layoutText(row.assessment),
+      shown(row.assessment.weightPlf),
+      shown(extra(row)),
+      shortGoverning(row.assessment),
     ]),
   );
 }

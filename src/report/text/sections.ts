@@ -1,3 +1,4 @@
+import { yieldByYearKsi } from "../../bridge/yield-stress.js";
 import type { Shape } from "../../catalogue/shape.js";
 import { CAUTION } from "../caution.js";
 import { shown } from "../numbers.js";
@@ -24,9 +25,15 @@ export function sectionsText(shapes: readonly Shape[], inList: number, style: St
       shown(shape.inertiaXIn4),
       shown(shape.sectionModulusXIn3),
       shown(shape.plasticModulusXIn3),
-      shape.yieldStressKsi === null ? "-" : shown(shape.yieldStressKsi),
+      yieldText(shape),
     ]),
   );
   const body = shapes.length === 0 ? ["No shape is left within these bounds."] : rows;
   return [head, "", ...body, "", ...wrap(`Caution: ${CAUTION}`, WIDTH, ""), ""].join("\n");
+}
+
+/** The row's own yield stress, or that of its year built, marked so. */
+function yieldText({ yieldStressKsi, stock }: Shape): string {
+  if (yieldStressKsi !== null) return shown(yieldStressKsi);
+  return typeof stock?.yearBuilt === "number" ? `${yieldByYearKsi(stock.yearBuilt)} by year` : "-";
 }

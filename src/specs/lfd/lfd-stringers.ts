@@ -164,6 +164,7 @@ export abstract class LfdStringers extends StringerAssessor {
   protected checkShear(index: number, { shape, fyKsi }: Steel, recorder: AssessmentRecorder | null): void {
     recorder?.topic("shear");
     const D = webDepth.of(shape.depthIn, shape.flangeThicknessIn);
+    recorder?.step(webDepth, D, shape.depthIn, shape.flangeThicknessIn);
     const Vcap = shearCapacityKip(fyKsi, D, shape.webThicknessIn, recorder);
     this.check(index, "shear", this.effects.Vu, Vcap, "kip", "10.48.8", recorder);
     const Vbs = withoutBearingStiffeners.of(Vcap);
@@ -180,6 +181,7 @@ export abstract class LfdStringers extends StringerAssessor {
   protected checkDeflection(index: number, inertiaIn4: number, recorder: AssessmentRecorder | null): number {
     const { bridge } = this.design;
     recorder?.topic("deflection");
+    recorder?.value("Id", inertiaIn4, "in4", "moment of inertia for live load");
     const delta = this.#deflectionIn(this.stringers[index], inertiaIn4, recorder);
     const dall = allowedDeflection.of(bridge.spanFt, bridge.deflection.spanOver);
     recorder?.step(allowedDeflection, dall, bridge.spanFt, bridge.deflection.spanOver);
@@ -217,6 +219,7 @@ export abstract class LfdStringers extends StringerAssessor {
     const { fatigueTruckKipFt: MT, fatigueImpact } = this.fixed;
     recorder?.topic("fatigue");
     recorder?.value("MT", MT, "kip-ft", `${FATIGUE_VEHICLE} truck, absolute maximum`);
+    recorder?.value("Sf", modulusIn3, "in3", "section modulus at the tension fibre for live load");
     const Mf = stringer.fatigueMomentKipFt;
     recorder?.step(fatigueMoment, Mf, MT, stringer.factors.moment.factor, fatigueImpact);
     const range = fatigueRange.of(Mf, modulusIn3);

@@ -248,6 +248,7 @@ function lateralBuckling(
   out: BareCapacity,
   recorder: Recorder | null,
 ): number {
+  recorder?.value("h", h, "in", "between the centroids of the flanges");
   const rt = torsionalRadius.of(bf, D, tw, tf);
   recorder?.step(torsionalRadius, rt, bf, D, tw, tf);
   const Lp = plasticLength.of(rt, E, Fy);

@@ -180,6 +180,7 @@ export abstract class LrfdStringers extends StringerAssessor {
     const { Vu } = this.effects;
     recorder?.topic("shear");
     const D = webDepth.of(shape.depthIn, shape.flangeThicknessIn);
+    recorder?.step(webDepth, D, shape.depthIn, shape.flangeThicknessIn);
     const Vn = this.#shearKip(D, shape.webThicknessIn, Fy, recorder);
     this.check(index, "shear", Vu, Vn, "kip", "6.10.9.2", recorder);
     if (recorder === null) return;
@@ -208,6 +209,7 @@ export abstract class LrfdStringers extends StringerAssessor {
     const { count } = this.layout;
     const Y = live.midspanDeflectionKipFt3;
     recorder?.topic("deflection");
+    recorder?.value("Id", inertiaIn4, "in4", "moment of inertia for live load");
     let delta: number;
     if (count === null) {
       const g = this.#factors.moment;
@@ -232,6 +234,7 @@ export abstract class LrfdStringers extends StringerAssessor {
     const MT = this.#fatigueTruckKipFt;
     recorder?.topic("fatigue");
     recorder?.value("MT", MT, "kip-ft", "fatigue truck, 8-32-32 kip at 14 and 30 ft, absolute maximum");
+    recorder?.value("Sf", modulusIn3, "in3", "section modulus at the bottom of the steel for live load");
     const range = rules.fatigueRange.of(gamma, MT, gf, modulusIn3);
     recorder?.step(rules.fatigueRange, range, gamma, MT, gf, modulusIn3);
     recorder?.value("Fr", resistanceKsi, "ksi", `${limitState}, detail ${this.design.bridge.liveLoad.fatigueDetail}`);

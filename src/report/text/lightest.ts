@@ -72,7 +72,9 @@ function remarks(best: Assessment): string[] {
   const overhang = best.layout.overhangFt === null ? "" : ` Overhang ${feetText(best.layout.overhangFt)} ft.`;
   const lines = [
     ...wrap(
-      `Spacings in ft; steel is lb per ft of bridge, kip all steel with pieces at full length and miscellaneous steel; depth in inches; int and ext are the interior and exterior stringer.${overhang}`,
+      best.layout.count === null
+        ? "Spacing in ft; steel is lb per ft of the stringer; depth in inches."
+        : `Spacings in ft; steel is lb per ft of bridge, kip all steel with pieces at full length and miscellaneous steel; depth in inches; int and ext are the interior and exterior stringer.${overhang}`,
       WIDTH,
       "",
     ),

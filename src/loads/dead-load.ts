@@ -92,6 +92,9 @@ export const wearingOnSpacing = formula(
   (pw: number, S: number) => (pw * S) / 1000,
 );
 
+/** Construction load on the tributary width. Source: common practice (the load); statics. */
+export const constructionLoad = formula("wc", "q * T / 1000", "kip/ft", "statics", ["q", "T"], (q: number, T: number) => (q * T) / 1000);
+
 /** Dead load on one stringer that does not hang on its shape. */
 export interface DeadLoad {
   /** Width of deck the stringer carries, ft. */

@@ -1,5 +1,6 @@
 import type { Assessment } from "../answers/assessment.js";
 import type { Bridge } from "../bridge/bridge.js";
+import { GROUP_I_LIVE, GROUP_IA_LIVE } from "../specs/lfd/load-factors.js";
 import { feetText, shown } from "./numbers.js";
 
 /**
@@ -19,7 +20,7 @@ export function byHandLines(
   const w = effects.deadStage1Klf + effects.deadStage2Klf + effects.deadWearingKlf;
   const MD = effects.momentStage1KipFt + effects.momentStage2KipFt + effects.momentWearingKipFt;
   const lighter = effects.oneLaneLiveMomentKipFt;
-  const groupIA = lighter !== null && 2.2 * lighter > 1.67 * effects.liveMomentKipFt;
+  const groupIA = lighter !== null && GROUP_IA_LIVE * lighter > GROUP_I_LIVE * effects.liveMomentKipFt;
   const ML = groupIA ? lighter : effects.liveMomentKipFt;
   const factor = groupIA ? (effects.oneLaneDistributionMoment ?? 0) : effects.distributionMoment;
   const lanes = groupIA ? ", one lane loaded (Group IA)" : "";

@@ -33,6 +33,7 @@ export function recordGiven(
   recorder.value("Sx", shape.sectionModulusXIn3, "in3", name);
   recorder.value("Zx", shape.plasticModulusXIn3, "in3", name);
   recorder.value("ry", shape.radiusYIn, "in", name);
+  recorder.value("kdes", shape.kDesignIn, "in", `${name}, face to toe of fillet`);
   recorder.value("J", shape.torsionJIn4, "in4", name);
   recorder.value("h/tw", shape.webSlenderness, "-", "clear of the fillets, as the list prints it; for comparison with D/tw");
   if (deck.thicknessIn !== null) recorder.value("t", deck.thicknessIn, "in", "deck, total thickness");
@@ -44,6 +45,10 @@ export function recordGiven(
   recorder.value("c", steel.miscFraction, "-", "miscellaneous steel, fraction of the shape");
   recorder.value("q", pour.constructionPsf, "lb/ft2", "construction load at the pour");
   recorder.value("a", bridge.pieceOverlapFt, "ft", "piece beyond the bearing at either end");
+  if (deck.fcKsi !== null) recorder.value("fc", deck.fcKsi, "ksi", "f'c of the deck");
+  if (deck.composite) recorder.value("ds", bridge.studs.diameterIn, "in", "stud");
+  recorder.value("N", bridge.bearing.lengthIn, "in", "bearing length");
+  recorder.value("ko", bridge.deflection.spanOver, "-", "span over allowed deflection");
   recorder.value("E", STEEL_MODULUS_KSI, "ksi", "steel");
 }
 

@@ -130,6 +130,3 @@ export const UNITS_TRIED: Readonly<Record<Quantity, readonly Unit[]>> = {
   number: [unit("", "number", 1, "none")],
   text: [unit("", "text", 1, "none")],
 };
-
-/** Inches, for what is not to be converted. */
-export const INCH = UNITS_TRIED.length[0];

@@ -160,6 +160,8 @@ export class CompositeStringers extends LfdStringers {
     recorder?.step(composite.bottomStress, fb, M1, Sx, lasting, this.#long.bottomIn3, fL, this.#short.bottomIn3);
     const ft3n = topStressKsi(lasting, this.#long.topIn3);
     const ftn = topStressKsi(fL, this.#short.topIn3);
+    recorder?.value("ft3n", ft3n, "ksi", "top of the steel, lasting load; 0 where it would be tension");
+    recorder?.value("ftn", ftn, "ksi", "top of the steel, live load; 0 where it would be tension");
     const ft = composite.topStress.of(M1, Sx, ft3n, ftn);
     recorder?.step(composite.topStress, ft, M1, Sx, ft3n, ftn);
     const Fo = composite.compositeOverloadLimit.of(Fy);

@@ -1,9 +1,10 @@
 import type { LfdFatigueDetail } from "../../bridge/bridge.js";
 import type { Layout } from "../../bridge/layouts.js";
+import { DIAPHRAGMS_AT_MOST_FT } from "../../bridge/resolve.js";
 import type { Steel } from "../../bridge/yield-stress.js";
 import type { Shape } from "../../catalogue/shape.js";
 import { renamed } from "../../formula.js";
-import { stage1Klf } from "../../loads/dead-load.js";
+import { constructionLoad, stage1Klf } from "../../loads/dead-load.js";
 import { IN_PER_FT, STEEL_MODULUS_KSI } from "../../units.js";
 import { bearingLengthNeededIn } from "../bearing.js";
 import type { AssessmentRecorder, Design, Effects, Position } from "../contract.js";
@@ -24,12 +25,9 @@ import {
   webSlenderness,
 } from "./flexure.js";
 import * as factors from "./load-factors.js";
-import { constructionLoad, pourMoment } from "./pour.js";
+import { pourMoment } from "./pour.js";
 import { shearCapacityKip, withoutBearingStiffeners } from "./shear.js";
 import { FATIGUE_VEHICLE, type LfdLayout, lfdLayout, type StringerLoads, stringerLoads } from "./stringer-loads.js";
-
-/** Greatest distance of diaphragms, ft. Source: AASHTO Standard Specifications, 17th ed., Art. 10.20.1. */
-const DIAPHRAGMS_AT_MOST_FT = 25;
 
 /** Loads and moments of one stringer with one shape. One object is used again and again. */
 export interface LfdEffects {

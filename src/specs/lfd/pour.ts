@@ -1,7 +1,5 @@
 import { formula } from "../../formula.js";
 
-/** Construction load on the tributary width. Source: common practice (the load); statics. */
-export const constructionLoad = formula("wc", "q * T / 1000", "kip/ft", "statics", ["q", "T"], (q: number, T: number) => (q * T) / 1000);
 /** Factored moment while the deck is poured. Source: AASHTO Standard Specifications, 17th ed., Art. 10.61; the factor is our choice. */
 export const pourMoment = formula(
   "Mpour",

@@ -5,12 +5,11 @@ import { type DeadLoad, deadLoadOf } from "../../loads/dead-load.js";
 import { impactFraction } from "../../loads/formulas.js";
 import { vehicleNamed } from "../../loads/vehicles.js";
 import type { AssessmentRecorder, Design, Position } from "../contract.js";
+import { curbInsideFt, mostTrucks } from "../place.js";
 import { type DistributionPlace, exteriorFactors, interiorFactors, type StringerFactors } from "./distribution.js";
 import { fatigueMoment } from "./fatigue.js";
 import * as factors from "./load-factors.js";
 
-/** Trucks side by side tried for one interior stringer when nobody said how wide the bridge is. */
-const TRUCKS_ON_UNKNOWN_WIDTH = 4;
 /** The fatigue truck. Source: AASHTO Standard Specifications, 17th ed., Art. 10.3.1, 3.7.6. */
 export const FATIGUE_VEHICLE = "HS20-44";
 
@@ -61,9 +60,9 @@ export function lfdLayout(design: Design, layout: Layout): LfdLayout {
     place: {
       spacingFt: layout.spacingFt,
       count: layout.count,
-      curbInsideFt: curbInsideFt(design, layout),
+      curbInsideFt: curbInsideFt(bridge, layout),
       lanes,
-      mostTrucks: bridge.deck.outToOutFt === null && lanes >= 2 ? TRUCKS_ON_UNKNOWN_WIDTH : lanes,
+      mostTrucks: mostTrucks(bridge),
     },
     impact: live.includesImpact ? 0 : fatigueImpact,
     fatigueImpact,
@@ -104,13 +103,6 @@ export function stringerLoads(fixed: LfdLayout, position: Position, recorder: As
     fatigueMomentKipFt: fatigueMoment.of(fatigueTruckKipFt, g, fatigueImpact),
     oneLaneFatigueMomentKipFt: fatigueMoment.of(fatigueTruckKipFt, g1, fatigueImpact),
   };
-}
-
-/** de: web of the exterior stringer to the curb face, ft; null for one interior stringer. */
-function curbInsideFt({ bridge }: Design, layout: Layout): number | null {
-  const { outToOutFt } = bridge.deck;
-  if (layout.overhangFt === null || outToOutFt === null || bridge.roadwayFt === null) return null;
-  return layout.overhangFt - (outToOutFt - bridge.roadwayFt) / 2;
 }
 
 /** The worst live end shear on a stringer over every place of every train with an axle at the support, and the lane loading. */

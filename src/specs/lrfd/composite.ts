@@ -115,6 +115,8 @@ export class CompositeLrfdStringers extends LrfdStringers {
     recorder?.step(rules.strengthBottom, fbu, M1, Sx, M2, Mw, this.#long.bottomIn3, ML, this.#short.bottomIn3);
     const ft3n = topStressKsi(1.25 * M2 + 1.5 * Mw, this.#long.topIn3);
     const ftn = topStressKsi(1.75 * ML, this.#short.topIn3);
+    recorder?.value("ft3n", ft3n, "ksi", "top of the steel, lasting load; 0 where it would be tension");
+    recorder?.value("ftn", ftn, "ksi", "top of the steel, live load; 0 where it would be tension");
     const ftu = rules.serviceTop.of(1.25 * M1, Sx, ft3n, ftn);
     recorder?.value("Mf1", 1.25 * M1, "kip-ft", "1.25 times stage 1");
     recorder?.step(renamed(rules.serviceTop, "ftu", { M1: "Mf1" }), ftu, 1.25 * M1, Sx, ft3n, ftn);
@@ -132,6 +134,8 @@ export class CompositeLrfdStringers extends LrfdStringers {
     recorder?.step(rules.serviceBottom, fb, M1, Sx, M2w, this.#long.bottomIn3, ML, this.#short.bottomIn3);
     const ft3n = topStressKsi(M2w, this.#long.topIn3);
     const ftn = topStressKsi(1.3 * ML, this.#short.topIn3);
+    recorder?.value("ft3n", ft3n, "ksi", "top of the steel, lasting load; 0 where it would be tension");
+    recorder?.value("ftn", ftn, "ksi", "top of the steel, live load; 0 where it would be tension");
     const ft = rules.serviceTop.of(M1, Sx, ft3n, ftn);
     recorder?.step(rules.serviceTop, ft, M1, Sx, ft3n, ftn);
     const Fs = rules.serviceLimitComposite.of(Fy);

@@ -92,11 +92,11 @@ export const exteriorShear = formula(
 /** The cross-section as a rigid body. Source: AASHTO LRFD, 9th ed., Art. C4.6.2.2.2d. */
 export const rigidSection = formula(
   "gr",
-  "m * (N / Nb + X * sume / sumx2)",
+  "m * (Nt / Nb + X * sume / sumx2)",
   "lanes",
   "C4.6.2.2.2d",
-  ["m", "N", "Nb", "X", "sume", "sumx2"],
-  (m: number, N: number, Nb: number, X: number, sume: number, sumx2: number) => m * (N / Nb + (X * sume) / sumx2),
+  ["m", "Nt", "Nb", "X", "sume", "sumx2"],
+  (m: number, Nt: number, Nb: number, X: number, sume: number, sumx2: number) => m * (Nt / Nb + (X * sume) / sumx2),
 );
 /** Spacing over the table's divisor, decks other than concrete. Source: AASHTO LRFD, 9th ed., Table 4.6.2.2.2a-1. */
 export const spacingOverDivisor = formula("g", "S / kd", "lanes", "4.6.2.2.2a", ["S", "kd"], (S: number, kd: number) => S / kd);
@@ -304,9 +304,13 @@ function rigidLanes(place: LrfdPlace, recorder: Recorder | null): { worst: numbe
     const m = multiplePresence(N);
     const factor = rigidSection.of(m, N, Nb, X, sume, sumx2);
     if (N === 1) oneTruck = rigidSection.of(1, 1, Nb, X, sume, sumx2);
+    if (N === 1) recorder?.value("X", X, "ft", "outer stringer from the middle of the group");
+    if (N === 1) recorder?.value("sumx2", sumx2, "ft2", "squares of the stringers' distances from the middle");
+    if (N === 1) recorder?.value("sume", sume, "ft", "one truck from the middle of the group");
     if (N === 1) recorder?.step({ ...rigidSection, symbol: "grf" }, oneTruck, 1, 1, Nb, X, sume, sumx2);
     if (factor > worst.factor) worst = { factor, m, N, sume };
   }
+  recorder?.value("sume", worst.sume, "ft", `sum of ${worst.N} trucks' distances from the middle, the worst number of trucks`);
   recorder?.step(rigidSection, worst.factor, worst.m, worst.N, Nb, X, worst.sume, sumx2);
   return { worst: worst.factor, oneTruck };
 }

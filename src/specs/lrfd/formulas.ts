@@ -85,21 +85,21 @@ export const shearYielding = formula(
 );
 export const shearInelastic = formula(
   "Vn",
-  "0.58 * Fy * D * tw * 1.12 * q / (D / tw)",
+  "0.58 * Fy * D * tw * 1.12 * qv / (D / tw)",
   "kip",
   "6.10.9.3.2",
-  ["Fy", "D", "tw", "q"],
-  (Fy: number, D: number, tw: number, q: number) => (0.58 * Fy * D * tw * 1.12 * q) / (D / tw),
+  ["Fy", "D", "tw", "qv"],
+  (Fy: number, D: number, tw: number, qv: number) => (0.58 * Fy * D * tw * 1.12 * qv) / (D / tw),
 );
 export const shearElastic = formula(
   "Vn",
-  "0.58 * Fy * D * tw * 1.57 * q^2 / (D / tw)^2",
+  "0.58 * Fy * D * tw * 1.57 * qv^2 / (D / tw)^2",
   "kip",
   "6.10.9.3.2",
-  ["Fy", "D", "tw", "q"],
-  (Fy: number, D: number, tw: number, q: number) => (0.58 * Fy * D * tw * 1.57 * q ** 2) / (D / tw) ** 2,
+  ["Fy", "D", "tw", "qv"],
+  (Fy: number, D: number, tw: number, qv: number) => (0.58 * Fy * D * tw * 1.57 * qv ** 2) / (D / tw) ** 2,
 );
-export const shearRoot = formula("q", "sqrt(5 * E / Fy)", "-", "6.10.9.3.2", ["E", "Fy"], (E: number, Fy: number) =>
+export const shearRoot = formula("qv", "sqrt(5 * E / Fy)", "-", "6.10.9.3.2", ["E", "Fy"], (E: number, Fy: number) =>
   Math.sqrt((5 * E) / Fy),
 );
 

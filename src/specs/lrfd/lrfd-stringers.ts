@@ -3,11 +3,12 @@ import type { Layout } from "../../bridge/layouts.js";
 import type { Steel } from "../../bridge/yield-stress.js";
 import type { Shape } from "../../catalogue/shape.js";
 import { greatestMoment } from "../../loads/axle-train.js";
-import { type DeadLoad, deadLoadOf, stage1Klf } from "../../loads/dead-load.js";
+import { constructionLoad, type DeadLoad, deadLoadOf, stage1Klf } from "../../loads/dead-load.js";
 import { IN_PER_FT, STEEL_MODULUS_KSI } from "../../units.js";
 import { bearingLengthNeededIn, webAtBearingKip } from "../bearing.js";
 import type { AssessmentRecorder, Design, Effects, Position } from "../contract.js";
 import * as moments from "../dead-moments.js";
+import { curbInsideFt, mostTrucks } from "../place.js";
 import { recordGiven, recordLaneEffects } from "../record-given.js";
 import { StringerAssessor } from "../stringer-assessor.js";
 import { type LrfdPlace, type LrfdShare, lrfdFactors, lrfdShare, multiplePresence, newLrfdFactors } from "./distribution.js";
@@ -24,8 +25,6 @@ import {
 import * as rules from "./formulas.js";
 
 const E = STEEL_MODULUS_KSI;
-/** Trucks side by side tried for one interior stringer when nobody said how wide the bridge is. */
-const TRUCKS_ON_UNKNOWN_WIDTH = 4;
 /** Fewest stringers for which the distribution formulas were made. Source: AASHTO LRFD, 9th ed., Table 4.6.2.2.2b-1. */
 const FEWEST_STRINGERS = 4;
 /** The fatigue truck: the design truck with its rear axles 30 ft apart. Source: AASHTO LRFD, 9th ed., Art. 3.6.1.4.1. */
@@ -89,7 +88,7 @@ export abstract class LrfdStringers extends StringerAssessor {
     recorder?.value("T", tributaryFt, "ft", "tributary width");
     const dead = deadLoadOf(bridge, { tributaryFt, spacingFt, count }, recorder);
     recorder?.topic("distribution");
-    const constructionKlf = (bridge.pour.constructionPsf * tributaryFt) / 1000;
+    const constructionKlf = constructionLoad.of(bridge.pour.constructionPsf, tributaryFt);
     return { position, dead, share: lrfdShare(bridge, this.#place(position), recorder), constructionKlf };
   }
 
@@ -103,18 +102,11 @@ export abstract class LrfdStringers extends StringerAssessor {
       slabIn: this.ts === 0 ? null : this.ts,
       haunchIn: bridge.deck.haunchSectionIn,
       count: this.layout.count,
-      curbInsideFt: this.#curbInsideFt(),
+      curbInsideFt: curbInsideFt(this.design.bridge, this.layout),
       roadwayFt: bridge.roadwayFt,
       lanes,
-      mostTrucks: bridge.deck.outToOutFt === null && lanes >= 2 ? TRUCKS_ON_UNKNOWN_WIDTH : lanes,
+      mostTrucks: mostTrucks(bridge),
     };
-  }
-
-  #curbInsideFt(): number | null {
-    const { deck, roadwayFt } = this.design.bridge;
-    const { overhangFt } = this.layout;
-    if (overhangFt === null || deck.outToOutFt === null || roadwayFt === null) return null;
-    return overhangFt - (deck.outToOutFt - roadwayFt) / 2;
   }
 
   /** Writes down all that stands before the shape comes in, then works out the effects, writing them down too. */
@@ -154,7 +146,7 @@ export abstract class LrfdStringers extends StringerAssessor {
 
   #recordBefore({ position }: LrfdStringer, steel: Steel, recorder: AssessmentRecorder): void {
     recorder.stringer(position);
-    recordGiven(this.design, this.layout, this.#curbInsideFt(), steel, recorder);
+    recordGiven(this.design, this.layout, curbInsideFt(this.design.bridge, this.layout), steel, recorder);
     recordLaneEffects(this.design, 0, recorder);
     this.#stringer(position, recorder);
     if (this.ts > 0) recorder.value("n", this.n, "-", "modular ratio");
@@ -251,7 +243,7 @@ export abstract class LrfdStringers extends StringerAssessor {
     const Sx = shape.sectionModulusXIn3;
     const fl = bridge.pour.lateralBendingKsi;
     recorder?.topic("deck-pour");
-    recorder?.value("wc", wc, "kip/ft", "construction load on the tributary width");
+    recorder?.step(constructionLoad, wc, bridge.pour.constructionPsf, this.stringers[index].dead.tributaryFt);
     recorder?.value("Lb", this.diaphragmsIn, "in", "diaphragms alone brace the flange while the deck is wet");
     const Ma = rules.pourMomentStrength.of(w1, wc, bridge.spanFt);
     recorder?.step(rules.pourMomentStrength, Ma, w1, wc, bridge.spanFt);
